@@ -1,0 +1,33 @@
+import { Module } from '@nestjs/common';
+import { AuditModule } from './audit/audit.module.js';
+import { AuthModule } from './auth/auth.module.js';
+import { CalendarDateScalar } from './common/scalars/calendar-date.scalar.js';
+import { DateTimeScalar } from './common/scalars/date-time.scalar.js';
+import { DecimalScalar } from './common/scalars/decimal.scalar.js';
+import { ConfigModule } from './config/config.module.js';
+import { DatabaseModule } from './database/database.module.js';
+import { GraphqlModule } from './graphql.module.js';
+import { JobsModule } from './jobs/jobs.module.js';
+import { MembershipsModule } from './memberships/memberships.module.js';
+import { OrganisationsModule } from './organisations/organisations.module.js';
+import { RoundsModule } from './rounds/rounds.module.js';
+import { TenancyModule } from './tenancy/tenancy.module.js';
+import { HealthController } from './web-host/health.controller.js';
+
+@Module({
+  imports: [
+    ConfigModule,
+    DatabaseModule,
+    TenancyModule,
+    JobsModule,
+    GraphqlModule,
+    AuditModule,
+    AuthModule,
+    OrganisationsModule,
+    MembershipsModule,
+    RoundsModule,
+  ],
+  providers: [DecimalScalar, CalendarDateScalar, DateTimeScalar],
+  controllers: [HealthController],
+})
+export class AppModule {}

@@ -1,0 +1,6 @@
+import type { Request, Response } from 'express';
+
+export interface GraphqlContext {
+  req: Request;
+  res: Response;
+}

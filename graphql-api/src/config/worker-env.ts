@@ -1,0 +1,16 @@
+import { required } from './env.js';
+
+/** What the worker process needs beside the rest. */
+export interface WorkerEnv {
+  databaseWorkerUrl: string;
+  concurrency: number;
+}
+
+export const WORKER_ENV = Symbol('WORKER_ENV');
+
+export function readWorkerEnv(source: NodeJS.ProcessEnv = process.env): WorkerEnv {
+  return {
+    databaseWorkerUrl: required(source, 'DATABASE_WORKER_URL'),
+    concurrency: Number(source.WORKER_CONCURRENCY ?? 3),
+  };
+}

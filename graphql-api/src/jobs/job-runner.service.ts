@@ -1,0 +1,55 @@
+import { Inject, Injectable, Logger, type OnApplicationBootstrap, type OnApplicationShutdown } from '@nestjs/common';
+import { DiscoveryService } from '@nestjs/core';
+import { run, type Runner, type TaskList } from 'graphile-worker';
+import { WORKER_ENV, type WorkerEnv } from '../config/worker-env.js';
+import { runInScope } from '../tenancy/request-context.js';
+import { JobHandler, type HandlesJob } from './job-handler.decorator.js';
+import type { JobTask } from './jobs.service.js';
+
+interface Envelope {
+  organisationId: string;
+  payload: never;
+}
+
+/** Takes jobs from the queue and runs each in the context of its organisation. */
+@Injectable()
+export class JobRunnerService implements OnApplicationBootstrap, OnApplicationShutdown {
+  private readonly log = new Logger('Jobs');
+  private runner: Runner | undefined;
+
+  constructor(
+    private readonly discovery: DiscoveryService,
+    @Inject(WORKER_ENV) private readonly env: WorkerEnv,
+  ) {}
+
+  async onApplicationBootstrap() {
+    this.runner = await run({
+      connectionString: this.env.databaseWorkerUrl,
+      concurrency: this.env.concurrency,
+      noHandleSignals: true,
+      taskList: this.taskList(),
+    });
+  }
+
+  async onApplicationShutdown() {
+    await this.runner?.stop();
+  }
+
+  private taskList(): TaskList {
+    const handlers = this.discovery
+      .getProviders({ metadataKey: JobHandler.KEY })
+      .map((wrapper) => [this.discovery.getMetadataByDecorator(JobHandler, wrapper), wrapper.instance] as const);
+    return Object.fromEntries(
+      handlers.map(([task, handler]) => [task, this.inOrganisation(handler as HandlesJob<JobTask>)]),
+    );
+  }
+
+  private inOrganisation(handler: HandlesJob<JobTask>) {
+    return async (envelope: unknown, { job }: { job: { id: string; task_identifier: string } }) => {
+      const { organisationId, payload } = envelope as Envelope;
+      const caller = { organisationId, membershipId: null, userId: null, sessionId: null, roles: [] };
+      this.log.log(`${job.task_identifier} ${job.id} organisation ${organisationId}`);
+      await runInScope({ requestId: `job-${job.id}`, caller, loaders: new Map() }, () => handler.run(payload));
+    };
+  }
+}

@@ -1,0 +1,18 @@
+import { Injectable } from '@nestjs/common';
+import type { EntityManager } from 'typeorm';
+
+/** Every task that a worker knows, with what its job carries. */
+export interface JobPayloads {
+  'frontier.search': { runId: string };
+  'letter.send': { letterId: string };
+}
+
+export type JobTask = keyof JobPayloads;
+
+@Injectable()
+export class JobsService {
+  /** Queues the job in the open transaction: the change and its job both happen or neither. */
+  async enqueue<T extends JobTask>(em: EntityManager, task: T, payload: JobPayloads[T]): Promise<void> {
+    await em.query('select jobs.enqueue($1, $2)', [task, JSON.stringify(payload)]);
+  }
+}

@@ -1,0 +1,4 @@
+export interface Message {
+  subject: string;
+  body: string;
+}

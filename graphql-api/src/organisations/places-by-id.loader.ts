@@ -1,0 +1,31 @@
+import { Injectable } from '@nestjs/common';
+import { In } from 'typeorm';
+import { NotFoundError } from '../common/domain-error.js';
+import { RequestLoader } from '../common/request-loader.js';
+import { TenantDatabase } from '../tenancy/tenant-database.js';
+import { Department } from './entities/department.entity.js';
+import { Site } from './entities/site.entity.js';
+
+@Injectable()
+export class SitesByIdLoader extends RequestLoader<string, Site> {
+  constructor(private readonly db: TenantDatabase) {
+    super();
+  }
+
+  protected async batch(ids: readonly string[]) {
+    const rows = await this.db.transaction((em) => em.findBy(Site, { id: In([...ids]) }));
+    return ids.map((id) => rows.find((row) => row.id === id) ?? new NotFoundError('site', id));
+  }
+}
+
+@Injectable()
+export class DepartmentsByIdLoader extends RequestLoader<string, Department> {
+  constructor(private readonly db: TenantDatabase) {
+    super();
+  }
+
+  protected async batch(ids: readonly string[]) {
+    const rows = await this.db.transaction((em) => em.findBy(Department, { id: In([...ids]) }));
+    return ids.map((id) => rows.find((row) => row.id === id) ?? new NotFoundError('department', id));
+  }
+}

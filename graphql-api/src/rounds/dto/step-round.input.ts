@@ -1,0 +1,37 @@
+import { createUnionType, Field, ID, InputType, Int, ObjectType } from '@nestjs/graphql';
+import { IsInt, IsUUID, MaxLength, MinLength } from 'class-validator';
+import { Round } from '../entities/round.entity.js';
+
+@InputType()
+export class AdvanceRoundInput {
+  @Field(() => ID)
+  @IsUUID()
+  roundId: string;
+
+  @Field(() => Int)
+  @IsInt()
+  version: number;
+}
+
+@InputType()
+export class StepBackRoundInput extends AdvanceRoundInput {
+  @Field()
+  @MinLength(3, { message: 'Say why the round goes back' })
+  @MaxLength(1_000)
+  reason: string;
+}
+
+@ObjectType()
+export class RoundNotReady {
+  @Field()
+  message: string;
+
+  @Field(() => [String])
+  missing: string[];
+}
+
+export const AdvanceRoundResult = createUnionType({
+  name: 'AdvanceRoundResult',
+  types: () => [Round, RoundNotReady] as const,
+  resolveType: (value) => ('missing' in value ? RoundNotReady : Round),
+});

@@ -1,0 +1,7 @@
+import 'reflect-metadata';
+import { NestFactory } from '@nestjs/core';
+import { WorkerModule } from './worker.module.js';
+
+const worker = await NestFactory.createApplicationContext(WorkerModule, { logger: ['error', 'warn', 'log'] });
+worker.enableShutdownHooks();
+console.log('worker ready');
