@@ -1,0 +1,100 @@
+import { ActionList, ActionMenu } from '@primer/react';
+import styled from 'styled-components';
+import { errorMessage } from '../../lib/error-code';
+import { roleNames } from '../../lib/roles';
+import { useViewer } from '../../lib/viewer';
+import { announce } from '../../ui/announce';
+import { Icon } from '../../ui/icon';
+import { useSwitchOrganisation } from './use-switch-organisation';
+
+/** The clinic group at work; a menu for members of several. */
+export function OrganisationSwitch({ onSwitched }: { onSwitched: () => void }) {
+  const { organisation, memberships } = useViewer();
+  const switchOrganisation = useSwitchOrganisation();
+  if (memberships.length < 2) {
+    return (
+      <Box as="div">
+        <Name name={organisation.name} sites={organisation.sites.length} demo={organisation.demo} />
+      </Box>
+    );
+  }
+  async function choose(organisationId: string) {
+    if (organisationId === organisation.id) return;
+    try {
+      await switchOrganisation(organisationId);
+      onSwitched();
+    } catch (error) {
+      announce(errorMessage(error));
+    }
+  }
+  return (
+    <ActionMenu>
+      <ActionMenu.Anchor>
+        <Box type="button" aria-label={`Clinic group: ${organisation.name}`}>
+          <Name name={organisation.name} sites={organisation.sites.length} demo={organisation.demo} />
+          <Icon name="down" />
+        </Box>
+      </ActionMenu.Anchor>
+      <ActionMenu.Overlay width="medium">
+        <ActionList selectionVariant="single">
+          {memberships.map((choice) => (
+            <ActionList.Item
+              key={choice.organisationId}
+              selected={choice.organisationId === organisation.id}
+              onSelect={() => void choose(choice.organisationId)}
+            >
+              {choice.organisationName}
+              <ActionList.Description variant="block">{roleNames(choice.roles)}</ActionList.Description>
+            </ActionList.Item>
+          ))}
+        </ActionList>
+      </ActionMenu.Overlay>
+    </ActionMenu>
+  );
+}
+
+function Name({ name, sites, demo }: { name: string; sites: number; demo: boolean }) {
+  return (
+    <Text>
+      <b>{name}</b>
+      <span>
+        {sites} {sites === 1 ? 'site' : 'sites'}
+        {demo && ' · demo data'}
+      </span>
+    </Text>
+  );
+}
+
+const Box = styled.button`
+  display: flex;
+  align-items: center;
+  justify-content: space-between;
+  gap: 8px;
+  width: calc(100% - 16px);
+  margin: 4px 0 12px 16px;
+  padding: 8px 10px;
+  border: 1px solid var(--mw-line-strong);
+  border-radius: var(--mw-r-2);
+  background: var(--mw-surface);
+  color: var(--mw-ink);
+  text-align: left;
+  &[type='button'] {
+    cursor: pointer;
+  }
+  &[type='button']:hover {
+    background: var(--mw-raised);
+    border-color: var(--mw-ink-3);
+  }
+`;
+
+const Text = styled.span`
+  min-width: 0;
+  b {
+    display: block;
+    line-height: 1.25;
+  }
+  span {
+    font-size: 12px;
+    color: var(--mw-ink-2);
+  }
+`;
