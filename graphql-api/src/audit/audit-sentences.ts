@@ -1,5 +1,6 @@
 /** Every action that the trail knows, and how it reads. The names in the data are those at the time. */
 const SENTENCES = {
+  'demo.loaded': () => 'Demo data loaded',
   'session.opened': () => 'Signed in',
   'round.ceiling': (d) => `Budget ceiling set to ${d.after}, was ${d.before}`,
   'round.stage': (d) => `Round moved from ${d.before} to ${d.after}`,
@@ -7,7 +8,8 @@ const SENTENCES = {
   'candidate.changed': () => 'Candidate changed',
   'quote.created': (d) => `Quote ${d.number} of ${d.vendor} entered`,
   'quote.changed': (d) => `Quote ${d.number} of ${d.vendor} changed`,
-  'quote.kept': (d) => (d.number ? `Quote ${d.number} of ${d.vendor} kept` : 'Choice of the quote left to the rule'),
+  'quote.kept': (d) =>
+    d.number ? `Quote ${d.number} of ${d.vendor} kept` : 'Choice of the quote left to the rule',
   'document.uploaded': (d) => `Document ${d.fileName} uploaded`,
   'document.opened': (d) => `Document ${d.fileName} opened`,
   'limit.created': (d) => `Limit “${d.name}” added`,
@@ -32,7 +34,9 @@ export interface AuditData {
 }
 
 export function sentenceOf(action: string, data: Record<string, unknown>): string {
-  const sentence = (SENTENCES as Record<string, ((data: Record<string, string>) => string) | undefined>)[action];
+  const sentence = (SENTENCES as Record<string, ((data: Record<string, string>) => string) | undefined>)[
+    action
+  ];
   const words = Object.fromEntries(Object.entries(data).map(([name, value]) => [name, String(value ?? '')]));
   return sentence ? sentence(words) : action;
 }

@@ -18,7 +18,11 @@ export class AuditService {
   constructor(private readonly db: TenantDatabase) {}
 
   /** Appends to the trail within the transaction of the change itself: both happen or neither. */
-  async record(em: EntityManager, action: AuditAction, { roundId, objectId, data = {} }: AuditSubject): Promise<void> {
+  async record(
+    em: EntityManager,
+    action: AuditAction,
+    { roundId, objectId, data = {} }: AuditSubject,
+  ): Promise<void> {
     await em.query('select metewand.audit_append($1, $2, $3, $4)', [
       action,
       roundId ?? null,
@@ -49,7 +53,9 @@ export class AuditService {
 
   verify(): Promise<AuditVerification> {
     return this.db.transaction(async (em) => {
-      const broken = await em.query<{ seq: string }[]>('select broken_seq as seq from metewand.audit_verify() order by 1');
+      const broken = await em.query<{ seq: string }[]>(
+        'select broken_seq as seq from metewand.audit_verify() order by 1',
+      );
       return {
         entries: await em.count(AuditEntryRow),
         whole: broken.length === 0,

@@ -57,6 +57,8 @@ export class Organisations1764600002000 implements MigrationInterface {
   }
 
   down(db: QueryRunner) {
-    return db.query('drop table metewand.membership, metewand.department, metewand.site, metewand.organisation');
+    return db.query(
+      'drop table metewand.membership, metewand.department, metewand.site, metewand.organisation',
+    );
   }
 }

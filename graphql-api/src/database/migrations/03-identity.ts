@@ -1,4 +1,5 @@
 import type { MigrationInterface, QueryRunner } from 'typeorm';
+import { NO_ORGANISATION } from '../guard.js';
 
 /**
  * People and sessions belong to no organisation. The API role reaches them through the functions below only;
@@ -28,6 +29,7 @@ export class Identity1764600003000 implements MigrationInterface {
       );
       create index on identity.refresh_token (session_id);
 
+      ${NO_ORGANISATION}
       alter table metewand.membership add foreign key (user_id) references identity.app_user;
       grant select on metewand.membership, metewand.organisation to app_login;
       grant select on identity.app_user to app_login;

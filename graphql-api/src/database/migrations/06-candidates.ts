@@ -21,7 +21,7 @@ export class Candidates1764600006000 implements MigrationInterface {
         residual_percent numeric(5,2) not null default 0 check (residual_percent between 0 and 100),
         works_net_minor bigint not null default 0 check (works_net_minor >= 0),
         consumables_yearly_minor bigint not null default 0 check (consumables_yearly_minor >= 0),
-        energy_yearly_minor bigint not null default 0 check (energy_yearly_minor >= 0),
+        energy_yearly_minor bigint not null default 0, -- negative where less is used than now
         current_running_yearly_minor bigint not null default 0 check (current_running_yearly_minor >= 0),
         installation_days numeric(8,2) not null default 0 check (installation_days >= 0),
         floor_area_m2 numeric(8,2) not null default 0 check (floor_area_m2 >= 0),

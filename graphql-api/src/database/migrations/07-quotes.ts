@@ -1,5 +1,5 @@
 import type { MigrationInterface, QueryRunner } from 'typeorm';
-import { guard } from '../guard.js';
+import { guard, NO_ORGANISATION } from '../guard.js';
 
 /** Vendors, quotes and the documents behind them. Amounts are in minor units of the quote's currency. */
 export class Quotes1764600007000 implements MigrationInterface {
@@ -48,6 +48,7 @@ export class Quotes1764600007000 implements MigrationInterface {
       ${guard('quote')}
 
       -- A kept quote is one of the candidate's own.
+      ${NO_ORGANISATION}
       alter table metewand.candidate add foreign key (organisation_id, id, kept_quote_id)
         references metewand.quote (organisation_id, candidate_id, id) on delete set null (kept_quote_id);
 
