@@ -54,6 +54,8 @@ function checkRolesCover(emitted: GraphQLSchema) {
   const missing = operations.filter((name) => !(name in OPERATION_ROLES));
   const unknown = Object.keys(OPERATION_ROLES).filter((name) => !operations.includes(name));
   if (missing.length || unknown.length) {
-    throw new Error(`The table of roles lacks [${missing.join(', ')}] and names unknown [${unknown.join(', ')}].`);
+    throw new Error(
+      `The table of roles lacks [${missing.join(', ')}] and names unknown [${unknown.join(', ')}].`,
+    );
   }
 }

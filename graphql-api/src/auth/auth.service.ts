@@ -30,7 +30,11 @@ export class AuthService {
 
     const refreshToken = this.tokens.newRefreshToken();
     const { organisationId } = membership;
-    const sessionId = await this.sessions.open(account.userId, organisationId, this.tokens.hashOf(refreshToken));
+    const sessionId = await this.sessions.open(
+      account.userId,
+      organisationId,
+      this.tokens.hashOf(refreshToken),
+    );
     if (!sessionId) return refused;
     await this.record('session.opened', sessionId, organisationId);
     writeRefreshCookie(response, refreshToken);
@@ -42,7 +46,10 @@ export class AuthService {
     const refreshToken = readRefreshCookie(request);
     if (!refreshToken) throw new UnauthenticatedError();
     const successor = this.tokens.successorOf(refreshToken);
-    const session = await this.sessions.rotate(this.tokens.hashOf(refreshToken), this.tokens.hashOf(successor));
+    const session = await this.sessions.rotate(
+      this.tokens.hashOf(refreshToken),
+      this.tokens.hashOf(successor),
+    );
     if (!session) {
       clearRefreshCookie(response);
       throw new UnauthenticatedError();

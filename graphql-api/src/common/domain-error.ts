@@ -45,7 +45,9 @@ export class ConflictError extends DomainError {
   readonly code = 'CONFLICT';
   override readonly details: { currentVersion: number };
   constructor(what: string, currentVersion: number) {
-    super(`This ${what} was changed by somebody else in the meantime. Nothing was saved. Load it again and repeat your change.`);
+    super(
+      `This ${what} was changed by somebody else in the meantime. Nothing was saved. Load it again and repeat your change.`,
+    );
     this.details = { currentVersion };
   }
 }

@@ -5,7 +5,12 @@ import { currentRequestId } from '../tenancy/request-context.js';
 import { DomainError } from './domain-error.js';
 
 const log = new Logger('GraphQL');
-const SAFE_CODES = new Set(['GRAPHQL_PARSE_FAILED', 'GRAPHQL_VALIDATION_FAILED', 'BAD_REQUEST', 'BAD_USER_INPUT']);
+const SAFE_CODES = new Set([
+  'GRAPHQL_PARSE_FAILED',
+  'GRAPHQL_VALIDATION_FAILED',
+  'BAD_REQUEST',
+  'BAD_USER_INPUT',
+]);
 
 /** The only way out for errors: a code, words a person can act on, the request's id, and nothing of our insides. */
 export function formatError(formatted: GraphQLFormattedError, error: unknown): GraphQLFormattedError {
@@ -13,13 +18,23 @@ export function formatError(formatted: GraphQLFormattedError, error: unknown): G
   const requestId = currentRequestId();
   const place = { path: formatted.path, locations: formatted.locations };
   if (original instanceof DomainError) {
-    return { message: original.message, ...place, extensions: { code: original.code, requestId, ...original.details } };
+    return {
+      message: original.message,
+      ...place,
+      extensions: { code: original.code, requestId, ...original.details },
+    };
   }
   const code = formatted.extensions?.code;
-  if (typeof code === 'string' && SAFE_CODES.has(code) && !(original instanceof Error && original.name === 'QueryFailedError')) {
+  if (
+    typeof code === 'string' &&
+    SAFE_CODES.has(code) &&
+    !(original instanceof Error && original.name === 'QueryFailedError')
+  ) {
     return { message: formatted.message, locations: formatted.locations, extensions: { code, requestId } };
   }
-  log.error(`${requestId} ${original instanceof Error ? (original.stack ?? original.message) : String(original)}`);
+  log.error(
+    `${requestId} ${original instanceof Error ? (original.stack ?? original.message) : String(original)}`,
+  );
   return {
     message: 'Something went wrong on our side. Nothing of this step was saved.',
     path: formatted.path,

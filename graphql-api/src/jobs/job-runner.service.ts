@@ -1,4 +1,10 @@
-import { Inject, Injectable, Logger, type OnApplicationBootstrap, type OnApplicationShutdown } from '@nestjs/common';
+import {
+  Inject,
+  Injectable,
+  Logger,
+  type OnApplicationBootstrap,
+  type OnApplicationShutdown,
+} from '@nestjs/common';
 import { DiscoveryService } from '@nestjs/core';
 import { run, type Runner, type TaskList } from 'graphile-worker';
 import { WORKER_ENV, type WorkerEnv } from '../config/worker-env.js';
@@ -38,7 +44,9 @@ export class JobRunnerService implements OnApplicationBootstrap, OnApplicationSh
   private taskList(): TaskList {
     const handlers = this.discovery
       .getProviders({ metadataKey: JobHandler.KEY })
-      .map((wrapper) => [this.discovery.getMetadataByDecorator(JobHandler, wrapper), wrapper.instance] as const);
+      .map(
+        (wrapper) => [this.discovery.getMetadataByDecorator(JobHandler, wrapper), wrapper.instance] as const,
+      );
     return Object.fromEntries(
       handlers.map(([task, handler]) => [task, this.inOrganisation(handler as HandlesJob<JobTask>)]),
     );
@@ -49,7 +57,9 @@ export class JobRunnerService implements OnApplicationBootstrap, OnApplicationSh
       const { organisationId, payload } = envelope as Envelope;
       const caller = { organisationId, membershipId: null, userId: null, sessionId: null, roles: [] };
       this.log.log(`${job.task_identifier} ${job.id} organisation ${organisationId}`);
-      await runInScope({ requestId: `job-${job.id}`, caller, loaders: new Map() }, () => handler.run(payload));
+      await runInScope({ requestId: `job-${job.id}`, caller, loaders: new Map() }, () =>
+        handler.run(payload),
+      );
     };
   }
 }

@@ -25,7 +25,13 @@ export class MailService implements OnApplicationShutdown {
   }
 
   async send({ id, to, subject, text }: OutgoingMail): Promise<void> {
-    await this.transport.sendMail({ from: this.env.smtp.from, to, subject, text, messageId: `<${id}@metewand.example>` });
+    await this.transport.sendMail({
+      from: this.env.smtp.from,
+      to,
+      subject,
+      text,
+      messageId: `<${id}@metewand.example>`,
+    });
   }
 
   onApplicationShutdown() {

@@ -19,7 +19,12 @@ export class MembershipsService {
     return this.db.transaction(async (em) => {
       const membership = await em.findOneByOrFail(Membership, { id: currentMembershipId() });
       const memberships = await this.sessions.membershipsOf(currentCaller().userId ?? '');
-      return { membership, email: membership.email, organisation: await this.organisations.current(), memberships };
+      return {
+        membership,
+        email: membership.email,
+        organisation: await this.organisations.current(),
+        memberships,
+      };
     });
   }
 

@@ -9,4 +9,7 @@ export enum Role {
   REQUESTER = 'REQUESTER',
 }
 
-registerEnumType(Role, { name: 'Role', description: 'What a member does in an organisation. A member may hold several.' });
+registerEnumType(Role, {
+  name: 'Role',
+  description: 'What a member does in an organisation. A member may hold several.',
+});

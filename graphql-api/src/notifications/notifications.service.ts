@@ -21,7 +21,11 @@ export class NotificationsService {
   ) {}
 
   /** Writes one letter a member within the transaction of the change it tells of. */
-  async write(em: EntityManager, membershipIds: readonly string[], { subject, body }: Message): Promise<void> {
+  async write(
+    em: EntityManager,
+    membershipIds: readonly string[],
+    { subject, body }: Message,
+  ): Promise<void> {
     for (const membershipId of membershipIds) {
       const letter = await em.save(em.create(Letter, { membershipId, subject, body, state: 'WAITING' }));
       await this.jobs.enqueue(em, 'letter.send', { letterId: letter.id });

@@ -11,7 +11,9 @@ export class OrganisationsService {
 
   /** The caller's own organisation: the only one the database shows. */
   current(): Promise<Organisation> {
-    return this.db.transaction((em) => em.findOneByOrFail(Organisation, { id: currentCaller().organisationId }));
+    return this.db.transaction((em) =>
+      em.findOneByOrFail(Organisation, { id: currentCaller().organisationId }),
+    );
   }
 
   sites(): Promise<Site[]> {

@@ -39,7 +39,9 @@ export class RoundsService {
   }
 
   exchangeRates(roundId: string): Promise<ExchangeRate[]> {
-    return this.db.transaction((em) => em.find(ExchangeRate, { where: { roundId }, order: { currency: 'ASC' } }));
+    return this.db.transaction((em) =>
+      em.find(ExchangeRate, { where: { roundId }, order: { currency: 'ASC' } }),
+    );
   }
 
   /**
@@ -48,9 +50,14 @@ export class RoundsService {
    */
   async lockChangeable(em: EntityManager, roundId: string): Promise<Round> {
     await findOrThrow(em, Round, 'round', roundId);
-    const round = await em.findOneOrFail(Round, { where: { id: roundId }, lock: { mode: 'pessimistic_read' } });
+    const round = await em.findOneOrFail(Round, {
+      where: { id: roundId },
+      lock: { mode: 'pessimistic_read' },
+    });
     if (!canChangeContents(round.stage)) {
-      throw new WrongStageError('A portfolio of this round is submitted or approved, so its figures are frozen.');
+      throw new WrongStageError(
+        'A portfolio of this round is submitted or approved, so its figures are frozen.',
+      );
     }
     return round;
   }
@@ -73,7 +80,8 @@ export class RoundsService {
     return this.db.transaction(async (em) => {
       const round = await lockVersion(em, Round, 'round', roundId, version);
       const next = stageAfter(round.stage);
-      if (!next) throw new WrongStageError('From here the round goes on by submitting and deciding a portfolio.');
+      if (!next)
+        throw new WrongStageError('From here the round goes on by submitting and deciding a portfolio.');
       const missing: string[] = [];
       for (const check of this.readinessChecks) missing.push(...(await check(em, round)));
       if (missing.length) return { message: 'The round cannot go on yet.', missing };

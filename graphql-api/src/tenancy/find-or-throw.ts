@@ -17,7 +17,12 @@ export function isUuid(id: string): boolean {
 }
 
 /** The row with this id within the organisation. Another organisation's id looks like one that does not exist. */
-export async function findOrThrow<T extends Identified>(em: EntityManager, entity: EntityTarget<T>, what: string, id: string) {
+export async function findOrThrow<T extends Identified>(
+  em: EntityManager,
+  entity: EntityTarget<T>,
+  what: string,
+  id: string,
+) {
   const row = isUuid(id) ? await em.findOneBy(entity, { id } as FindOptionsWhere<T>) : null;
   if (!row) throw new NotFoundError(what, id);
   return row;

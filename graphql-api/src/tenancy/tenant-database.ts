@@ -16,10 +16,10 @@ export class TenantDatabase {
     if (joined) return work(joined);
     const { organisationId, membershipId } = currentCaller();
     return this.dataSource.transaction(async (em) => {
-      await em.query(`select set_config('app.organisation_id', $1, true), set_config('app.membership_id', $2, true)`, [
-        organisationId,
-        membershipId ?? '',
-      ]);
+      await em.query(
+        `select set_config('app.organisation_id', $1, true), set_config('app.membership_id', $2, true)`,
+        [organisationId, membershipId ?? ''],
+      );
       return this.open.run(em, () => work(em));
     });
   }

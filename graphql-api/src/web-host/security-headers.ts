@@ -10,7 +10,8 @@ export function pageNonce(_request: Request, response: Response, next: NextFunct
 
 /** `storageOrigin`: where the browser posts uploads to and fetches documents from. */
 export function securityHeaders(storageOrigin: string, production: boolean) {
-  const nonce = (_request: unknown, response: { locals?: { nonce?: string } }) => `'nonce-${response.locals?.nonce ?? ''}'`;
+  const nonce = (_request: unknown, response: { locals?: { nonce?: string } }) =>
+    `'nonce-${response.locals?.nonce ?? ''}'`;
   return helmet({
     hsts: production,
     referrerPolicy: { policy: 'no-referrer' },

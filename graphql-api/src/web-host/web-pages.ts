@@ -9,7 +9,10 @@ export function webFiles(webDist: string) {
 }
 
 function cacheHashedFiles(response: Response, path: string) {
-  response.setHeader('cache-control', path.includes('/assets/') ? 'public, max-age=31536000, immutable' : 'no-cache');
+  response.setHeader(
+    'cache-control',
+    path.includes('/assets/') ? 'public, max-age=31536000, immutable' : 'no-cache',
+  );
 }
 
 export function webPage(webDist: string) {

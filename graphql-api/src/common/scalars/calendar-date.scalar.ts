@@ -8,9 +8,12 @@ export class CalendarDateScalar implements CustomScalar<string, string> {
 
   parseValue(value: unknown): string {
     if (typeof value === 'string' && isCalendarDate(value)) return value;
-    throw new GraphQLError(`Write a day as year-month-day, such as "2027-02-15", not ${JSON.stringify(value)}.`, {
-      extensions: { code: 'BAD_USER_INPUT' },
-    });
+    throw new GraphQLError(
+      `Write a day as year-month-day, such as "2027-02-15", not ${JSON.stringify(value)}.`,
+      {
+        extensions: { code: 'BAD_USER_INPUT' },
+      },
+    );
   }
 
   serialize(value: unknown): string {

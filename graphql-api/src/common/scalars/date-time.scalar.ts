@@ -11,9 +11,12 @@ export class DateTimeScalar implements CustomScalar<string, Date> {
   parseValue(value: unknown): Date {
     const date = typeof value === 'string' && INSTANT.test(value) ? new Date(value) : undefined;
     if (date && !Number.isNaN(date.getTime())) return date;
-    throw new GraphQLError(`Write an instant in UTC, such as "2027-02-15T09:30:00Z", not ${JSON.stringify(value)}.`, {
-      extensions: { code: 'BAD_USER_INPUT' },
-    });
+    throw new GraphQLError(
+      `Write an instant in UTC, such as "2027-02-15T09:30:00Z", not ${JSON.stringify(value)}.`,
+      {
+        extensions: { code: 'BAD_USER_INPUT' },
+      },
+    );
   }
 
   serialize(value: unknown): string {

@@ -10,9 +10,12 @@ export class DecimalScalar implements CustomScalar<string, string> {
 
   parseValue(value: unknown): string {
     if (typeof value === 'string' && DECIMAL.test(value)) return value;
-    throw new GraphQLError(`Write a number as text with a decimal point, such as "1250.00", not ${JSON.stringify(value)}.`, {
-      extensions: { code: 'BAD_USER_INPUT' },
-    });
+    throw new GraphQLError(
+      `Write a number as text with a decimal point, such as "1250.00", not ${JSON.stringify(value)}.`,
+      {
+        extensions: { code: 'BAD_USER_INPUT' },
+      },
+    );
   }
 
   serialize(value: unknown): string {
@@ -20,6 +23,8 @@ export class DecimalScalar implements CustomScalar<string, string> {
   }
 
   parseLiteral(node: ValueNode): string {
-    return this.parseValue(node.kind === Kind.STRING || node.kind === Kind.INT || node.kind === Kind.FLOAT ? node.value : null);
+    return this.parseValue(
+      node.kind === Kind.STRING || node.kind === Kind.INT || node.kind === Kind.FLOAT ? node.value : null,
+    );
   }
 }

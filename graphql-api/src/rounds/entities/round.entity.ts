@@ -10,7 +10,10 @@ export enum PaymentTiming {
   MIDDLE_OF_YEAR = 'MIDDLE_OF_YEAR',
 }
 
-registerEnumType(PaymentTiming, { name: 'PaymentTiming', description: 'When in the year yearly costs are paid.' });
+registerEnumType(PaymentTiming, {
+  name: 'PaymentTiming',
+  description: 'When in the year yearly costs are paid.',
+});
 
 @ObjectType()
 @Entity('round')
@@ -42,7 +45,9 @@ export class Round {
   @Column('bigint', { transformer: safeInteger })
   ceilingMinor: number;
 
-  @Field(() => DecimalScalar, { description: 'Share of the ceiling that is not spent in the round, in percent.' })
+  @Field(() => DecimalScalar, {
+    description: 'Share of the ceiling that is not spent in the round, in percent.',
+  })
   @Column('numeric')
   heldBackPercent: string;
 

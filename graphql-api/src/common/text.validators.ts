@@ -1,0 +1,20 @@
+import { applyDecorators } from '@nestjs/common';
+import { Transform } from 'class-transformer';
+import { IsString, MaxLength, MinLength } from 'class-validator';
+
+/** Text that may be empty. Blanks around it are dropped. */
+export function IsText(longest: number) {
+  return applyDecorators(
+    Transform(({ value }) => (typeof value === 'string' ? value.trim() : value)),
+    IsString(),
+    MaxLength(longest, { message: ({ property }) => `${property} has at most ${longest} characters` }),
+  );
+}
+
+/** Text that says something. */
+export function IsFilledText(longest: number) {
+  return applyDecorators(
+    IsText(longest),
+    MinLength(1, { message: ({ property }) => `${property} must not be empty` }),
+  );
+}
