@@ -1,13 +1,14 @@
 import type { RouteObject } from 'react-router-dom';
+import { Component as NotFound } from './routes/not-found';
 import { Root } from './routes/root';
-import { RouteError } from './routes/route-error';
+import { RouteError, StandAloneError } from './routes/route-error';
 import { Loading } from './ui/loading';
 
 /** Every page. A route module exports `Component` and, as it needs them, `loader` and `ErrorBoundary`. */
 export const routes: RouteObject[] = [
   {
     Component: Root,
-    ErrorBoundary: RouteError,
+    ErrorBoundary: StandAloneError,
     HydrateFallback: Loading,
     children: [
       { path: '/sign-in', lazy: () => import('./routes/sign-in') },
@@ -37,7 +38,7 @@ export const routes: RouteObject[] = [
           },
         ],
       },
-      { path: '*', lazy: () => import('./routes/not-found') },
+      { path: '*', Component: NotFound },
     ],
   },
 ];

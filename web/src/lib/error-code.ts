@@ -6,7 +6,8 @@ export type ErrorCode =
   | 'FORBIDDEN'
   | 'NOT_FOUND'
   | 'BAD_USER_INPUT'
-  | 'STALE'
+  | 'CONFLICT'
+  | 'WRONG_STAGE'
   | 'TOO_MANY_REQUESTS'
   | 'INTERNAL_SERVER_ERROR'
   | 'OFFLINE';
@@ -16,14 +17,18 @@ const KNOWN: ReadonlySet<string> = new Set<ErrorCode>([
   'FORBIDDEN',
   'NOT_FOUND',
   'BAD_USER_INPUT',
-  'STALE',
+  'CONFLICT',
+  'WRONG_STAGE',
   'TOO_MANY_REQUESTS',
 ]);
 
+/** No answer came at all. */
+export class OfflineError extends Error {}
+
 /** The code of any error a query or mutation can end in; a code we do not know counts as the server's own fault. */
 export function errorCode(error: unknown): ErrorCode {
-  if (!CombinedGraphQLErrors.is(error))
-    return error instanceof TypeError ? 'OFFLINE' : 'INTERNAL_SERVER_ERROR';
+  if (error instanceof OfflineError) return 'OFFLINE';
+  if (!CombinedGraphQLErrors.is(error)) return 'INTERNAL_SERVER_ERROR';
   const code = error.errors[0]?.extensions?.code;
   return typeof code === 'string' && KNOWN.has(code) ? (code as ErrorCode) : 'INTERNAL_SERVER_ERROR';
 }
@@ -35,12 +40,12 @@ export function requestId(error: unknown): string | undefined {
   return typeof id === 'string' ? id : undefined;
 }
 
-/** Messages per field of a refused input, such as `{ email: 'Write an e-mail address.' }`. */
+/** Messages per field of a refused input, such as `{ 'fields.unitPrice': 'Write an amount of zero or more.' }`. */
 export function fieldErrors(error: unknown): Record<string, string> {
   if (!CombinedGraphQLErrors.is(error)) return {};
   const fields = error.errors[0]?.extensions?.fields;
-  if (typeof fields !== 'object' || fields === null) return {};
-  return Object.fromEntries(Object.entries(fields).map(([field, message]) => [field, String(message)]));
+  if (!Array.isArray(fields)) return {};
+  return Object.fromEntries(fields.map(({ field, message }) => [String(field), String(message)]));
 }
 
 /** One sentence a person can act on. Our own API words its refusals; only the rest is worded here. */

@@ -1,8 +1,18 @@
 import { paths } from '../lib/paths';
 import { ButtonLink } from '../ui/button';
 import { ProblemPage } from '../ui/problem-page';
+import { StandAlone } from '../ui/stand-alone';
 
 export function Component() {
+  return (
+    <StandAlone>
+      <NoSuchPage />
+    </StandAlone>
+  );
+}
+
+/** What to show where there is no page. */
+export function NoSuchPage() {
   return (
     <ProblemPage
       title="There is no such page"

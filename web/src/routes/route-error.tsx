@@ -3,13 +3,14 @@ import { errorCode, errorMessage, requestId } from '../lib/error-code';
 import { paths } from '../lib/paths';
 import { Button, ButtonLink } from '../ui/button';
 import { ProblemPage } from '../ui/problem-page';
-import { Component as NotFound } from './not-found';
+import { StandAlone } from '../ui/stand-alone';
+import { NoSuchPage } from './not-found';
 
 /** What a page turns into when it cannot be loaded or drawn. */
 export function RouteError() {
   const error = useRouteError();
   const { revalidate, state } = useRevalidator();
-  if (isRouteErrorResponse(error) && error.status === 404) return <NotFound />;
+  if (isRouteErrorResponse(error) && error.status === 404) return <NoSuchPage />;
   const code = errorCode(error);
   if (code === 'NOT_FOUND') return <Gone message={errorMessage(error)} />;
   if (code === 'FORBIDDEN') return <Forbidden />;
@@ -35,6 +36,15 @@ export function RouteError() {
         },
       ]}
     />
+  );
+}
+
+/** The same outside the shell. */
+export function StandAloneError() {
+  return (
+    <StandAlone>
+      <RouteError />
+    </StandAlone>
   );
 }
 

@@ -17,7 +17,9 @@ export function Component() {
         <Rod thickness={12} long="40px" short="8px" />
       </Across>
       <Left>
-        <Wordmark size={36} />
+        <header>
+          <Wordmark size="large" />
+        </header>
         <main>
           <h1>Sign in</h1>
           <Lead>
@@ -78,7 +80,7 @@ const Lead = styled.p`
   color: var(--mw-ink-2);
 `;
 
-const Foot = styled.p`
+const Foot = styled.footer`
   max-width: 46ch;
   font-size: 13px;
   color: var(--mw-ink-2);

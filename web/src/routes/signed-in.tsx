@@ -1,5 +1,5 @@
 import { useEffect, useRef } from 'react';
-import { Outlet, useLocation, useNavigate, useNavigation, useParams } from 'react-router-dom';
+import { Outlet, useLocation, useNavigation, useParams } from 'react-router-dom';
 import styled from 'styled-components';
 import { ViewerMenu } from '../features/auth/viewer-menu';
 import { OrganisationSwitch } from '../features/organisations/organisation-switch';
@@ -22,7 +22,6 @@ export function Component() {
   const { rounds } = useViewer();
   const { roundId } = useParams();
   const can = useCan();
-  const navigate = useNavigate();
   const narrow = useNarrow();
   const main = useFocusOnPageChange();
   const busy = useNavigation().state === 'loading';
@@ -30,7 +29,7 @@ export function Component() {
   const navigation = {
     heading: round?.name ?? 'No round yet',
     items: round ? roundItems(round, can) : [],
-    organisation: <OrganisationSwitch onSwitched={() => void navigate(paths.home())} />,
+    organisation: <OrganisationSwitch onSwitched={() => window.location.assign(paths.home())} />,
     viewer: <ViewerMenu />,
   };
   return (
@@ -43,6 +42,7 @@ export function Component() {
         {round && <RoundStrip round={round} />}
         <Main id="main" ref={main} tabIndex={-1} aria-busy={busy}>
           <Outlet />
+          <div data-portal-root />
         </Main>
       </Side>
     </Shell>

@@ -13,22 +13,22 @@ export function Mark({ size = 28 }: { size?: number }) {
   );
 }
 
-/** Mark and name. `size` is the edge of the mark in px. */
-export function Wordmark({ size = 28 }: { size?: number }) {
+/** Mark and name. */
+export function Wordmark({ size = 'medium' }: { size?: 'medium' | 'large' }) {
   return (
     <Line $size={size}>
-      <Mark size={size} />
+      <Mark />
       <span>Metewand</span>
     </Line>
   );
 }
 
-const Line = styled.span<{ $size: number }>`
+const Line = styled.span<{ $size: 'medium' | 'large' }>`
   display: inline-flex;
   align-items: center;
   gap: 10px;
   font-weight: 800;
-  font-size: ${({ $size }) => ($size > 30 ? 22 : 18)}px;
+  font-size: ${({ $size }) => ($size === 'large' ? 22 : 18)}px;
   letter-spacing: -0.02em;
   color: var(--mw-ink);
 `;

@@ -2,7 +2,6 @@ import type { ButtonHTMLAttributes, ReactNode, Ref } from 'react';
 import { Button as PrimerButton, IconButton as PrimerIconButton } from '@primer/react';
 import { Link } from 'react-router-dom';
 import type { LinkProps } from 'react-router-dom';
-import styled from 'styled-components';
 import { Icon } from './icon';
 import type { IconName } from './icon';
 
@@ -45,17 +44,19 @@ export function ButtonLink({
   icon,
   trailingIcon,
   children,
+  to,
   ...rest
 }: Look & Omit<LinkProps, 'color'> & { children: ReactNode }) {
   return (
-    <PlainLink
+    <PrimerButton
       as={Link}
+      to={to}
       variant={primerVariant(variant)}
       {...visuals(icon, trailingIcon)}
       {...(rest as object)}
     >
       {children}
-    </PlainLink>
+    </PrimerButton>
   );
 }
 
@@ -93,7 +94,3 @@ function visuals(icon?: IconName, trailingIcon?: IconName) {
     trailingVisual: trailingIcon && (() => <Icon name={trailingIcon} />),
   };
 }
-
-const PlainLink = styled(PrimerButton)`
-  text-decoration: none;
-`;

@@ -1,7 +1,7 @@
 import { gql } from '@apollo/client';
 import type { TypedDocumentNode } from '@apollo/client';
 import { useMutation } from '@apollo/client/react';
-import { client, session } from '../../lib/apollo';
+import { session } from '../../lib/apollo';
 import { errorMessage } from '../../lib/error-code';
 import type { SignInMutation, SignInMutationVariables } from './use-sign-in.generated';
 
@@ -26,7 +26,6 @@ export function useSignIn() {
       const { data } = await signIn({ variables: { input: { email, password } } });
       const result = data!.signIn;
       if (result.__typename === 'SignInRefused') return result.message;
-      await client.clearStore();
       session.start(result.accessToken);
     } catch (error) {
       return errorMessage(error);

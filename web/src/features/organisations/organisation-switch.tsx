@@ -69,7 +69,7 @@ const Box = styled.button`
   display: flex;
   align-items: center;
   justify-content: space-between;
-  gap: 8px;
+  gap: 4px;
   width: calc(100% - 16px);
   margin: 4px 0 12px 16px;
   padding: 8px 10px;

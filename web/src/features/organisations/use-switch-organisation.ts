@@ -1,7 +1,6 @@
 import { gql } from '@apollo/client';
 import type { TypedDocumentNode } from '@apollo/client';
 import { useMutation } from '@apollo/client/react';
-import { client, session } from '../../lib/apollo';
 import type {
   SwitchOrganisationMutation,
   SwitchOrganisationMutationVariables,
@@ -18,12 +17,10 @@ const SWITCH_ORGANISATION: TypedDocumentNode<
   }
 `;
 
-/** Moves the session to another organisation of the member and forgets everything of the one before. */
+/** Moves the session to another organisation of the member. The page must be loaded anew, to forget the one before. */
 export function useSwitchOrganisation() {
   const [switchOrganisation] = useMutation(SWITCH_ORGANISATION, { fetchPolicy: 'no-cache' });
   return async (organisationId: string) => {
-    const { data } = await switchOrganisation({ variables: { organisationId } });
-    session.start(data!.switchOrganisation.accessToken);
-    await client.clearStore();
+    await switchOrganisation({ variables: { organisationId } });
   };
 }

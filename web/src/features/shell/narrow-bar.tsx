@@ -24,7 +24,7 @@ export function NarrowBar({ heading, items, organisation, viewer }: NarrowBarPro
     <Bar data-screen-only>
       <Top>
         <Home to={paths.home()} aria-label="Metewand, start page">
-          <Wordmark size={26} />
+          <Wordmark />
         </Home>
         <Toggle
           type="button"
@@ -46,7 +46,7 @@ export function NarrowBar({ heading, items, organisation, viewer }: NarrowBarPro
   );
 }
 
-const Bar = styled.div`
+const Bar = styled.header`
   background: var(--mw-surface);
   @media (min-width: 768px) {
     display: none;

@@ -7,7 +7,7 @@ import { StepRod } from '../../ui/step-rod';
 /** Which round, which of its five steps, and how long until the decision. */
 export function RoundStrip({ round }: { round: ViewerRound }) {
   return (
-    <Strip data-screen-only>
+    <Strip aria-label="Round" data-screen-only>
       <Name>{round.name}</Name>
       <Steps>
         <StepRod steps={STEPS} current={stepIndex(round.stage)} progress={stepProgress(round)} />
@@ -20,7 +20,7 @@ export function RoundStrip({ round }: { round: ViewerRound }) {
   );
 }
 
-const Strip = styled.header`
+const Strip = styled.section`
   position: sticky;
   top: 0;
   z-index: 10;
