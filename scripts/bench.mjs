@@ -1,0 +1,31 @@
+import { existsSync, readdirSync } from 'node:fs';
+import { join } from 'node:path';
+import { checkNode, compile, installDependencies, step } from './ground.mjs';
+import { runVerb } from './processes.mjs';
+import { root } from './root.mjs';
+
+// Runs graphql-api/kernels/*/bench/*.bench.mjs; `npm run bench -- search` runs those whose path contains "search".
+
+const wanted = process.argv[2] ?? '';
+
+await runVerb('bench', async (processes) => {
+  checkNode();
+  await installDependencies(processes);
+  await step('Build: API and kernels', () => compile(processes));
+  let failures = 0;
+  for (const bench of benches().filter((path) => path.includes(wanted))) {
+    console.log(`\n${bench}`);
+    const { code } = await processes.run([process.execPath, bench], { cwd: root });
+    if (code !== 0) failures += 1;
+  }
+  return failures === 0 ? 0 : 1;
+});
+
+function benches() {
+  const kernels = 'graphql-api/kernels';
+  return readdirSync(join(root, kernels))
+    .map((kernel) => `${kernels}/${kernel}/bench`)
+    .filter((folder) => existsSync(join(root, folder)))
+    .flatMap((folder) => readdirSync(join(root, folder)).map((file) => `${folder}/${file}`))
+    .filter((path) => path.endsWith('.bench.mjs'));
+}

@@ -1,0 +1,69 @@
+import { existsSync, mkdirSync, readFileSync, rmSync } from 'node:fs';
+import { dirname, join } from 'node:path';
+import { root, tool } from './root.mjs';
+
+/** A suite that has not ended by then hangs; it is ended, so that the others run and there is a last line. */
+const limitMs = 10 * 60 * 1000;
+
+/** The API and the kernels: jest, with a database and both fakes in its environment. */
+export function runJest(processes, environment, args) {
+  const command = (report) => [
+    ...tool('jest', 'graphql-api'),
+    '--ci',
+    '--json',
+    `--outputFile=${report}`,
+    ...args,
+  ];
+  return runSuite(processes, 'jest', command, { cwd: join(root, 'graphql-api'), env: environment });
+}
+
+/** The components of the web: vitest in jsdom. */
+export function runVitest(processes, args) {
+  const command = (report) => [...vitest(report), ...args];
+  return runSuite(processes, 'vitest', command, { cwd: join(root, 'web') });
+}
+
+/** The journeys: vitest drives Chromium against the started product. */
+export function runEndToEnd(processes, environment, args) {
+  const command = (report) => [...vitest(report), '--config=vitest.e2e.config.ts', ...args];
+  return runSuite(processes, 'e2e', command, { cwd: join(root, 'web'), env: environment });
+}
+
+/** A suite that never got as far as running counts as one failure. */
+export function notRun(name, error) {
+  console.log(`${name} could not run: ${error.message}`);
+  return { name, passed: 0, failed: 1, skipped: 0 };
+}
+
+function vitest(report) {
+  return [
+    ...tool('vitest', 'web'),
+    'run',
+    '--reporter=default',
+    '--reporter=json',
+    `--outputFile.json=${report}`,
+  ];
+}
+
+async function runSuite(processes, name, command, options) {
+  const report = join(root, '.local/test/reports', `${name}.json`);
+  mkdirSync(dirname(report), { recursive: true });
+  rmSync(report, { force: true });
+  const { code, how } = await processes.run(command(report), { ...options, limitMs });
+  if (!existsSync(report)) return notRun(name, new Error(`it ended without a report (${how})`));
+  return count(name, JSON.parse(readFileSync(report, 'utf8')), code);
+}
+
+/** Jest and vitest report alike. A file that could not be loaded, or a bad end with no failed test, is a failure too. */
+function count(name, report, code) {
+  const unloadable = report.testResults.filter(
+    (file) => file.status === 'failed' && !file.assertionResults.some(({ status }) => status === 'failed'),
+  );
+  const failed = report.numFailedTests + unloadable.length;
+  return {
+    name,
+    passed: report.numPassedTests,
+    failed: code !== 0 && failed === 0 ? 1 : failed,
+    skipped: report.numPendingTests + report.numTodoTests,
+  };
+}
