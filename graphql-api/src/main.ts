@@ -7,7 +7,7 @@ import { ENV, type Env } from './config/env.js';
 
 const app = await NestFactory.create<NestExpressApplication>(AppModule, {
   bodyParser: false,
-  logger: ['error', 'warn', 'log'],
+  logger: ['error', 'warn'],
 });
 setUpApp(app);
 const env = app.get<Env>(ENV);
