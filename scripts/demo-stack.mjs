@@ -16,7 +16,10 @@ export async function prepareDemo(processes, { nodeEnv }) {
     await migrate(processes, databaseUrls(cluster, database));
   });
   const { seedDemo } = await import('./seed/demo.mjs');
-  await step('Demo organisations', () => seedDemo(cluster.url('app_owner', database)));
+  await step('Demo organisations', async () => {
+    const isNew = await seedDemo(cluster.url('app_owner', database));
+    return isNew ? 'made' : 'already there';
+  });
   const port = await portFor('the product', preferredPort);
   const inboxPort = await portFor('the inbox', preferredInboxPort);
   const fakes = await startFakes(processes, name, { publicUrl: publicUrlOf(port), inboxPort });

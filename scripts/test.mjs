@@ -59,7 +59,7 @@ async function endToEnd(processes, cluster) {
   await step('Chromium: find or install it', async () => (browser = chromium()));
   const environment = await prepareDatabase(processes, cluster, 'metewand_e2e', 'production');
   const { seedDemo } = await import('./seed/demo.mjs');
-  await step('Demo organisations', () => seedDemo(environment.DATABASE_OWNER_URL));
+  await step('Demo organisations', async () => void (await seedDemo(environment.DATABASE_OWNER_URL)));
   const address = await startProduct(processes, environment);
   return runEndToEnd(
     processes,
