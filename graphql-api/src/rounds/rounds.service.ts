@@ -1,8 +1,9 @@
 import { Injectable } from '@nestjs/common';
 import type { EntityManager } from 'typeorm';
-import { formatDecimal, money, parseMoney } from '@metewand/money';
+import { formatDecimal, money } from '@metewand/money';
 import { AuditService } from '../audit/audit.service.js';
 import { WrongStageError } from '../common/domain-error.js';
+import { readAmounts } from '../common/read-amounts.js';
 import { OrganisationsService } from '../organisations/organisations.service.js';
 import { findOrThrow, lockVersion } from '../tenancy/find-or-throw.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
@@ -68,7 +69,7 @@ export class RoundsService {
       const round = await lockVersion(em, Round, 'round', input.roundId, input.version);
       const { currency } = await this.organisations.current();
       const before = formatDecimal(money(round.ceilingMinor, currency));
-      round.ceilingMinor = parseMoney(input.ceiling, currency).minor;
+      round.ceilingMinor = readAmounts(currency, 'input', { ceiling: input.ceiling }).ceiling;
       round.heldBackPercent = input.heldBackPercent;
       const data = { before, after: input.ceiling, detail: `${input.heldBackPercent} % held back` };
       await this.audit.record(em, 'round.ceiling', { roundId: round.id, data });
