@@ -31,7 +31,7 @@ export function readAmounts<T extends Record<string, string | null | undefined>>
 
 function readAmount(text: string, currency: string): number {
   const { minor } = parseMoney(text, currency);
-  if (minor > LARGEST_MINOR)
+  if (Math.abs(minor) > LARGEST_MINOR)
     throw new MoneyError('TOO_LARGE', `${text} is more than can be planned with here.`);
   return minor;
 }
