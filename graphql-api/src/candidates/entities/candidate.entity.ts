@@ -84,14 +84,14 @@ export class Candidate {
   mandatoryReason: string;
 
   @Field(() => [String], { description: 'What the site must provide before installation.' })
-  @Column('text', { array: true, default: [] })
+  @Column('text', { array: true })
   siteNeeds: string[];
 
   @Column('uuid', { nullable: true })
   keptQuoteId: string | null;
 
   @Field({ description: 'Why a certain quote was kept. Empty while the round’s rule chooses.' })
-  @Column('text', { default: '' })
+  @Column('text')
   keptReason: string;
 
   @Field(() => Int)

@@ -1,0 +1,19 @@
+import { Injectable } from '@nestjs/common';
+import { In } from 'typeorm';
+import { NotFoundError } from '../common/domain-error.js';
+import { RequestLoader } from '../common/request-loader.js';
+import { TenantDatabase } from '../tenancy/tenant-database.js';
+import { Candidate } from './entities/candidate.entity.js';
+
+@Injectable()
+export class CandidatesByIdLoader extends RequestLoader<string, Candidate> {
+  constructor(private readonly db: TenantDatabase) {
+    super();
+  }
+
+  protected async batch(ids: readonly string[]) {
+    const rows = await this.db.transaction((em) => em.findBy(Candidate, { id: In([...ids]) }));
+    const byId = new Map(rows.map((row) => [row.id, row]));
+    return ids.map((id) => byId.get(id) ?? new NotFoundError('candidate', id));
+  }
+}
