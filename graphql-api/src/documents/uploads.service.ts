@@ -1,0 +1,102 @@
+import { Injectable } from '@nestjs/common';
+import { AuditService } from '../audit/audit.service.js';
+import { CandidatesService } from '../candidates/candidates.service.js';
+import { documentKey, slotKey } from '../storage/storage-keys.js';
+import { StorageService } from '../storage/storage.service.js';
+import { findOrThrow } from '../tenancy/find-or-throw.js';
+import { currentMembershipId } from '../tenancy/request-context.js';
+import { TenantDatabase } from '../tenancy/tenant-database.js';
+import type { StartUploadInput } from './dto/start-upload.input.js';
+import { UploadRefused, UploadSlot } from './dto/upload.result.js';
+import { Document, DocumentState } from './entities/document.entity.js';
+import { isContentOf, sha256Of } from './file-content.js';
+import { acceptFile, LARGEST_FILE_BYTES, nothingArrived, wrongContent, wrongSize } from './file-rules.js';
+
+type Inspection = { sha256: string } | { refusal: string };
+
+/** An upload goes from the browser straight to a slot of the store; here it is announced, then checked and kept. */
+@Injectable()
+export class UploadsService {
+  constructor(
+    private readonly db: TenantDatabase,
+    private readonly candidates: CandidatesService,
+    private readonly storage: StorageService,
+    private readonly audit: AuditService,
+  ) {}
+
+  async start(input: StartUploadInput): Promise<UploadSlot | UploadRefused> {
+    const document = await this.announce(input);
+    if (document instanceof UploadRefused) return document;
+    const { url, fields } = await this.storage.uploadForm(
+      slotKey(document.id),
+      document.contentType,
+      LARGEST_FILE_BYTES,
+    );
+    return new UploadSlot(document, url, fields);
+  }
+
+  /** Asking again for a document that is ready changes nothing. */
+  async finish(documentId: string): Promise<Document | UploadRefused> {
+    const document = await this.db.transaction((em) => findOrThrow(em, Document, 'document', documentId));
+    if (document.state === DocumentState.READY) return document;
+    const inspection = await this.takeOver(document);
+    if ('refusal' in inspection) return this.refuse(document, inspection.refusal);
+    const kept = await this.markReady(document, inspection.sha256);
+    await this.storage.delete(slotKey(documentId));
+    return kept;
+  }
+
+  private announce(input: StartUploadInput): Promise<Document | UploadRefused> {
+    return this.db.transaction(async (em) => {
+      const { candidate } = await this.candidates.lockChangeable(em, input.candidateId);
+      const accepted = acceptFile(input);
+      if ('refusal' in accepted) return new UploadRefused(accepted.refusal);
+      const expected = em.create(Document, {
+        ...accepted,
+        candidateId: candidate.id,
+        quoteId: null,
+        state: DocumentState.EXPECTED,
+        sizeBytes: input.sizeBytes,
+        sha256: null,
+        uploadedBy: currentMembershipId(),
+      });
+      return em.save(expected);
+    });
+  }
+
+  /** Copies first and looks at the copy: the slot could still be written to while it is read. */
+  private async takeOver({ id, fileName, contentType, sizeBytes }: Document): Promise<Inspection> {
+    const arrived = await this.storage.sizeOf(slotKey(id));
+    if (arrived === null) return { refusal: nothingArrived(fileName) };
+    if (arrived !== sizeBytes || arrived > LARGEST_FILE_BYTES) return { refusal: wrongSize(fileName) };
+    await this.storage.copy(slotKey(id), documentKey(id));
+    const copied = await this.storage.sizeOf(documentKey(id));
+    if (copied !== sizeBytes) return { refusal: wrongSize(fileName) };
+    const bytes = await this.storage.read(documentKey(id));
+    if (!(await isContentOf(bytes, contentType))) return { refusal: wrongContent(fileName) };
+    return { sha256: sha256Of(bytes) };
+  }
+
+  private markReady({ id }: Document, sha256: string): Promise<Document> {
+    return this.db.transaction(async (em) => {
+      const { candidateId } = await findOrThrow(em, Document, 'document', id);
+      const { candidate } = await this.candidates.lockChangeable(em, candidateId);
+      const document = await findOrThrow(em, Document, 'document', id);
+      if (document.state === DocumentState.READY) return document;
+      document.state = DocumentState.READY;
+      document.sha256 = sha256;
+      await em.save(document);
+      const data = { fileName: document.fileName, sha256, detail: `${candidate.code} ${candidate.name}` };
+      await this.audit.record(em, 'document.uploaded', { roundId: candidate.roundId, objectId: id, data });
+      return document;
+    });
+  }
+
+  /** The row goes first: an object without a row cannot be reached, a row without an object would be a promise. */
+  private async refuse({ id }: Document, refusal: string): Promise<UploadRefused> {
+    await this.db.transaction((em) => em.delete(Document, { id, state: DocumentState.EXPECTED }));
+    await this.storage.delete(slotKey(id));
+    await this.storage.delete(documentKey(id));
+    return new UploadRefused(refusal);
+  }
+}
