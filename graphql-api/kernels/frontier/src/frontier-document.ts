@@ -1,0 +1,65 @@
+import { hypervolume } from './hypervolume.js';
+import type { Problem } from './problem.js';
+import type { FrontierPoint, SearchResult } from './search.js';
+
+/** A search's outcome, format `metewand-frontier/1`. */
+export interface FrontierDocument {
+  readonly format: 'metewand-frontier/1';
+  readonly problem?: string;
+  /** `sha256:` and 64 hex digits, taken of the problem's canonicalText. */
+  readonly fingerprint: string;
+  readonly seed: number;
+  readonly threads: number;
+  readonly seconds: number;
+  readonly points: readonly FrontierPoint[];
+  readonly certificate: Certificate;
+  readonly counts: SearchResult['counts'];
+  readonly notes: readonly string[];
+}
+
+/** What is proven about the points. The search proves nothing, so `bound` and `provenStretches` are empty. */
+export interface Certificate {
+  readonly status: SearchResult['status'];
+  readonly provenStretches: readonly (readonly [fromCost: number, toCost: number])[];
+  readonly bound: readonly (readonly [cost: number, benefit: number])[];
+  readonly hypervolume: number;
+  /** The corner the hypervolume is measured from: no benefit, at the ceiling or else at the dearest point. */
+  readonly reference: { readonly benefit: number; readonly cost: number };
+  /** Present where the run ended before it was done. */
+  readonly stopped?: true;
+}
+
+/** What the host knows of the run and the kernel does not. */
+export interface RunFacts {
+  readonly fingerprint: string;
+  readonly threads: number;
+  readonly seconds: number;
+}
+
+export function toFrontierDocument(
+  problem: Problem,
+  result: SearchResult,
+  facts: RunFacts,
+): FrontierDocument {
+  const reference = { benefit: 0, cost: problem.ceiling ?? result.points.at(-1)?.cost ?? 0 };
+  const steps = result.points.map(({ cost, benefit }) => [cost, benefit] as const);
+  return {
+    format: 'metewand-frontier/1',
+    ...(problem.name === undefined ? {} : { problem: problem.name }),
+    fingerprint: facts.fingerprint,
+    seed: result.seed,
+    threads: facts.threads,
+    seconds: facts.seconds,
+    points: result.points,
+    certificate: {
+      status: result.status,
+      provenStretches: [],
+      bound: [],
+      hypervolume: hypervolume(steps, reference),
+      reference,
+      ...(result.stopped ? { stopped: true as const } : {}),
+    },
+    counts: result.counts,
+    notes: result.notes,
+  };
+}
