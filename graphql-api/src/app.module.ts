@@ -1,15 +1,20 @@
 import { Module } from '@nestjs/common';
 import { AuditModule } from './audit/audit.module.js';
 import { AuthModule } from './auth/auth.module.js';
+import { CandidateTableModule } from './candidate-table/candidate-table.module.js';
+import { CandidatesModule } from './candidates/candidates.module.js';
 import { CalendarDateScalar } from './common/scalars/calendar-date.scalar.js';
 import { DateTimeScalar } from './common/scalars/date-time.scalar.js';
 import { DecimalScalar } from './common/scalars/decimal.scalar.js';
 import { ConfigModule } from './config/config.module.js';
+import { CostingModule } from './costing/costing.module.js';
 import { DatabaseModule } from './database/database.module.js';
+import { DocumentsModule } from './documents/documents.module.js';
 import { GraphqlModule } from './graphql.module.js';
 import { JobsModule } from './jobs/jobs.module.js';
 import { MembershipsModule } from './memberships/memberships.module.js';
 import { OrganisationsModule } from './organisations/organisations.module.js';
+import { QuotesModule } from './quotes/quotes.module.js';
 import { RoundsModule } from './rounds/rounds.module.js';
 import { TenancyModule } from './tenancy/tenancy.module.js';
 import { HealthController } from './web-host/health.controller.js';
@@ -26,6 +31,11 @@ import { HealthController } from './web-host/health.controller.js';
     OrganisationsModule,
     MembershipsModule,
     RoundsModule,
+    CandidatesModule,
+    DocumentsModule,
+    QuotesModule,
+    CostingModule,
+    CandidateTableModule,
   ],
   providers: [DecimalScalar, CalendarDateScalar, DateTimeScalar],
   controllers: [HealthController],
