@@ -7,6 +7,7 @@ export default defineConfig({
     environment: 'jsdom',
     include: ['src/**/*.test.{ts,tsx}'],
     setupFiles: ['./src/test/setup.ts'],
+    testTimeout: 30_000,
     css: false,
     // @primer/react imports its CSS, which Node cannot load by itself.
     server: { deps: { inline: [/@primer\/react/] } },

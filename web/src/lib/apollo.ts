@@ -1,9 +1,16 @@
-import { ApolloClient, ApolloLink, HttpLink, InMemoryCache, gql } from '@apollo/client';
+import {
+  ApolloClient,
+  ApolloLink,
+  CombinedGraphQLErrors,
+  HttpLink,
+  InMemoryCache,
+  gql,
+} from '@apollo/client';
 import type { TypedDocumentNode } from '@apollo/client';
 import { SetContextLink } from '@apollo/client/link/context';
 import { ErrorLink } from '@apollo/client/link/error';
 import { createQueryPreloader } from '@apollo/client/react';
-import { from, switchMap, throwError } from 'rxjs';
+import { from, switchMap, tap, throwError } from 'rxjs';
 import type { RefreshSessionMutation, RefreshSessionMutationVariables } from './apollo.generated';
 import { possibleTypes } from '../generated/possible-types';
 import { OfflineError, errorCode } from './error-code';
@@ -33,13 +40,19 @@ const addToken = new SetContextLink(async ({ headers }, operation) => {
 
 const renewOnce = new ErrorLink(({ error, operation, forward }) => {
   if (errorCode(error) !== 'UNAUTHENTICATED' || WITHOUT_TOKEN.has(operation.operationName)) return;
-  const { token, renewed } = operation.getContext();
+  const { token } = operation.getContext();
   // Without a token the renewal itself was refused, and the session has already ended.
   if (!token) return;
-  if (renewed) return session.end('expired');
-  operation.setContext({ renewed: true });
-  return from(session.renew(token)).pipe(switchMap(() => forward(operation)));
+  return from(session.renew(token)).pipe(
+    switchMap(() => forward(operation)),
+    tap(({ errors }) => errors && endIfRefused(new CombinedGraphQLErrors({ errors }))),
+  );
 });
+
+// A fresh token that is refused too will not get better by renewing it.
+function endIfRefused(error: unknown) {
+  if (errorCode(error) === 'UNAUTHENTICATED') session.end('expired');
+}
 
 // fetch gives a TypeError when no answer came; a bug of ours gives one too, and must not be taken for it.
 const nameOffline = new ErrorLink(({ error }) =>

@@ -35,7 +35,7 @@ function decimalPlace(typed: string, fractionDigits: number): number {
 
 function groupsAreWhole(whole: string): boolean {
   if (!/[.,]/u.test(whole)) return /^-?\d*$/u.test(whole);
-  return /^-?\d{1,3}(\.\d{3})+$/u.test(whole) || /^-?\d{1,3}(,\d{3})+$/u.test(whole);
+  return /^-?[1-9]\d{0,2}(\.\d{3})+$/u.test(whole) || /^-?[1-9]\d{0,2}(,\d{3})+$/u.test(whole);
 }
 
 function decimalSign(): string {

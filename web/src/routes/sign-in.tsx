@@ -73,6 +73,9 @@ const Left = styled.div`
     justify-content: flex-start;
     padding-top: 24px;
   }
+  @media (max-width: 767px) {
+    padding-inline: 16px;
+  }
 `;
 
 const Lead = styled.p`
@@ -89,6 +92,14 @@ const Foot = styled.footer`
 const Right = styled.div`
   overflow: hidden;
   background: var(--mw-rod);
+  svg {
+    display: block;
+    overflow: visible;
+    width: 100%;
+    min-width: 820px;
+    height: 100%;
+    min-height: 720px;
+  }
   @media (max-width: 1023px) {
     display: none;
   }

@@ -18,32 +18,35 @@ const WOOD = 'var(--mw-rod)';
 const LEFT = 64;
 const PER_THOUSAND = 0.42;
 const ROD_TOP = 700;
+// Long enough to run out of a wide window; the rest is cut off.
+const ROD_LENGTH = 2520;
+const GRADUATION = 4.2;
 const CEILING = LEFT + 1600 * PER_THOUSAND;
 
 /** Equipment laid along a rod up to the ceiling. Decoration beside the form. */
 export function SignInPicture() {
   return (
-    <svg viewBox="0 0 820 900" width="820" height="900" fontFamily="var(--mw-font)" aria-hidden>
+    <svg viewBox="0 0 820 900" preserveAspectRatio="xMinYMid meet" fontFamily="var(--mw-font)" aria-hidden>
       {ITEMS.map(([name, thousands], index) => (
         <Item key={name} name={name} thousands={thousands} index={index} x={startOf(index)} />
       ))}
       <path d={`M${startOf(ITEMS.length)} 626V${ROD_TOP}`} stroke={INK} opacity=".28" strokeDasharray="1 5" />
       <g>
-        <rect x={LEFT} y={ROD_TOP} width="756" height="64" fill={INK} />
-        {Array.from({ length: 181 }, (_, i) => (
+        <rect x={LEFT} y={ROD_TOP} width={ROD_LENGTH} height="64" fill={INK} />
+        {Array.from({ length: ROD_LENGTH / GRADUATION + 1 }, (_, i) => (
           <path
             key={i}
-            d={`M${LEFT + i * 4.2} ${ROD_TOP}v${height(i)}`}
+            d={`M${LEFT + i * GRADUATION} ${ROD_TOP}v${height(i)}`}
             stroke={WOOD}
             strokeWidth={i % 10 === 0 ? 2 : 1}
           />
         ))}
-        {Array.from({ length: 17 }, (_, i) => i + 1)
+        {Array.from({ length: ROD_LENGTH / (10 * GRADUATION) }, (_, i) => i + 1)
           .filter((i) => i !== 16)
           .map((i) => (
             <text
               key={i}
-              x={LEFT + i * 42}
+              x={LEFT + i * 10 * GRADUATION}
               y={ROD_TOP + 52}
               fontSize="14"
               fontWeight="600"
