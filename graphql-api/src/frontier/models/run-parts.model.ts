@@ -1,0 +1,127 @@
+import { Field, Float, ID, Int, ObjectType, registerEnumType } from '@nestjs/graphql';
+import { MoneyModel } from '../../common/models/money.model.js';
+import { DecimalScalar } from '../../common/scalars/decimal.scalar.js';
+
+export enum CertificateStatus {
+  COMPLETE = 'COMPLETE',
+  BOUNDED = 'BOUNDED',
+  UNPROVEN = 'UNPROVEN',
+  INFEASIBLE = 'INFEASIBLE',
+}
+
+registerEnumType(CertificateStatus, {
+  name: 'CertificateStatus',
+  description:
+    'How far it is proven that the front is all there is. UNPROVEN: nothing better was found, no more.',
+});
+
+@ObjectType({ description: 'One portfolio of a front.' })
+export class RunPoint {
+  @Field(() => DecimalScalar)
+  benefit: string;
+
+  @Field(() => MoneyModel, { description: 'On the axis of the run.' })
+  cost: MoneyModel;
+
+  @Field(() => MoneyModel)
+  capital: MoneyModel;
+
+  @Field(() => [Int], { description: 'Indices of the run’s items.' })
+  picks: number[];
+}
+
+@ObjectType({ description: 'A candidate by its quote in force, as frozen when the run was started.' })
+export class RunItem {
+  @Field(() => ID)
+  candidateId: string;
+
+  @Field(() => ID)
+  quoteId: string;
+
+  @Field()
+  code: string;
+
+  @Field()
+  name: string;
+
+  @Field()
+  siteName: string;
+
+  @Field()
+  departmentName: string;
+
+  @Field()
+  vendorName: string;
+
+  @Field(() => DecimalScalar)
+  benefit: string;
+
+  @Field(() => MoneyModel)
+  capital: MoneyModel;
+
+  @Field(() => MoneyModel)
+  lifeCycleCost: MoneyModel;
+
+  @Field()
+  mandatory: boolean;
+}
+
+@ObjectType({ description: 'A candidate that the run could not choose.' })
+export class RunLeftOut {
+  @Field(() => ID)
+  candidateId: string;
+
+  @Field()
+  code: string;
+
+  @Field()
+  name: string;
+
+  @Field()
+  reason: string;
+
+  @Field()
+  mandatory: boolean;
+}
+
+@ObjectType({ description: 'Points for drawing only, in currency units and benefit points.' })
+export class ChartPoints {
+  @Field(() => [Float])
+  costs: number[];
+
+  @Field(() => [Float])
+  benefits: number[];
+}
+
+@ObjectType()
+export class RunProgress {
+  @Field(() => Float, { description: 'Portfolios whose benefit and cost were worked out.' })
+  evaluations: number;
+
+  @Field(() => Int)
+  kept: number;
+
+  @Field(() => Float)
+  lookedAt: number;
+
+  @Field(() => DecimalScalar, { nullable: true })
+  bestBenefit: string | null;
+
+  @Field(() => Float, { description: 'Of the evaluations it may use, 0 to 1.' })
+  share: number;
+}
+
+@ObjectType()
+export class RunCertificate {
+  @Field(() => CertificateStatus)
+  status: CertificateStatus;
+
+  @Field(() => [[Float]], { description: 'Stretches of cost, [from, to], in which nothing is missing.' })
+  provenStretches: number[][];
+
+  @Field(() => ChartPoints, { description: 'Steps that no portfolio passes; empty while nothing is proven.' })
+  bound: ChartPoints;
+
+  @Field(() => Float, { nullable: true })
+  gapPercent: number | null;
+}

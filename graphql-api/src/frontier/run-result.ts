@@ -1,0 +1,82 @@
+import type { Problem } from '@metewand/frontier';
+
+/** The JSON that a run's row keeps. Money in minor units, benefit in ten-thousandths of a point. */
+
+/** The labels behind the problem's items, frozen with it: column `items`. */
+export interface RunInput {
+  currency: string;
+  /** What could be spent on capital. */
+  spendableMinor: number;
+  items: RunItemRow[];
+  leftOut: RunLeftOutRow[];
+}
+
+/** In the order of the problem's items, whose id is the code. */
+export interface RunItemRow {
+  candidateId: string;
+  quoteId: string;
+  code: string;
+  name: string;
+  siteName: string;
+  departmentName: string;
+  vendorName: string;
+  benefit: number;
+  capitalMinor: number;
+  lifeCycleCostMinor: number;
+  mandatory: boolean;
+}
+
+export interface RunLeftOutRow {
+  candidateId: string;
+  code: string;
+  name: string;
+  reason: string;
+  mandatory: boolean;
+}
+
+/** A portfolio of the front: `picks` are indices of items, rising. */
+export interface RunPointRow {
+  benefit: number;
+  cost: number;
+  picks: number[];
+}
+
+export type ChartPair = readonly [cost: number, benefit: number];
+
+/** Where a search is: column `progress`. */
+export interface RunProgressRow {
+  evaluations: number;
+  of: number;
+  kept: number;
+  points: RunPointRow[];
+}
+
+/** What a search found: column `result`. */
+export interface RunResultRow {
+  status: 'UNPROVEN' | 'INFEASIBLE';
+  stopped: boolean;
+  evaluations: number;
+  of: number;
+  /** In order of cost, rising in both figures. */
+  points: RunPointRow[];
+  kneeIndex: number | null;
+  lookedAt: ChartPair[];
+  onceKept: ChartPair[];
+  counts: { lookedAt: number; kept: number; sinceBeaten: number };
+  notes: string[];
+}
+
+/** What the thread of a search gets to work on. */
+export interface SearchOrder {
+  problem: Problem;
+  seed: number;
+  evaluations: number;
+  /** A stop counts only from here on: somebody has seen a front this far already. */
+  leastEvaluations: number;
+  /** One integer, 1 to stop. */
+  stop: SharedArrayBuffer;
+}
+
+/** What the thread of a search says. */
+export type SearchMessage =
+  { kind: 'progress'; progress: RunProgressRow } | { kind: 'result'; result: RunResultRow };
