@@ -10,12 +10,16 @@ import { ConfigModule } from './config/config.module.js';
 import { CostingModule } from './costing/costing.module.js';
 import { DatabaseModule } from './database/database.module.js';
 import { DocumentsModule } from './documents/documents.module.js';
+import { FrontierModule } from './frontier/frontier.module.js';
 import { GraphqlModule } from './graphql.module.js';
 import { JobsModule } from './jobs/jobs.module.js';
+import { LimitsModule } from './limits/limits.module.js';
 import { MembershipsModule } from './memberships/memberships.module.js';
 import { OrganisationsModule } from './organisations/organisations.module.js';
+import { OverviewModule } from './overview/overview.module.js';
 import { QuotesModule } from './quotes/quotes.module.js';
 import { RoundsModule } from './rounds/rounds.module.js';
+import { ScoringModule } from './scoring/scoring.module.js';
 import { TenancyModule } from './tenancy/tenancy.module.js';
 import { HealthController } from './web-host/health.controller.js';
 
@@ -36,6 +40,10 @@ import { HealthController } from './web-host/health.controller.js';
     QuotesModule,
     CostingModule,
     CandidateTableModule,
+    LimitsModule,
+    ScoringModule,
+    OverviewModule,
+    FrontierModule,
   ],
   providers: [DecimalScalar, CalendarDateScalar, DateTimeScalar],
   controllers: [HealthController],

@@ -3,6 +3,7 @@ import { DiscoveryModule } from '@nestjs/core';
 import { ConfigModule } from './config/config.module.js';
 import { readWorkerEnv, WORKER_ENV } from './config/worker-env.js';
 import { DatabaseModule } from './database/database.module.js';
+import { FrontierWorkerModule } from './frontier/frontier-worker.module.js';
 import { JobRunnerService } from './jobs/job-runner.service.js';
 import { JobsModule } from './jobs/jobs.module.js';
 import { MailModule } from './mail/mail.module.js';
@@ -12,7 +13,16 @@ import { TenancyModule } from './tenancy/tenancy.module.js';
 
 /** The same features without the API. */
 @Module({
-  imports: [ConfigModule, DatabaseModule, TenancyModule, JobsModule, DiscoveryModule, MailModule, NotificationsModule],
+  imports: [
+    ConfigModule,
+    DatabaseModule,
+    TenancyModule,
+    JobsModule,
+    DiscoveryModule,
+    MailModule,
+    NotificationsModule,
+    FrontierWorkerModule,
+  ],
   providers: [{ provide: WORKER_ENV, useFactory: () => readWorkerEnv() }, JobRunnerService, SendLetterJob],
 })
 export class WorkerModule {}
