@@ -86,6 +86,7 @@ export function makeDatabase(cluster, database, { fresh = false } = {}) {
     if (fresh) await client.query(`drop database if exists ${database} with (force)`);
     const { rowCount } = await client.query('select from pg_database where datname = $1', [database]);
     if (rowCount === 0) await client.query(`create database ${database} owner app_owner`);
+    await client.query(`grant create on database ${database} to app_worker`); // the queue brings its own schema
   });
 }
 
