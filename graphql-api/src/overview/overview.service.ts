@@ -39,7 +39,7 @@ export class OverviewService {
       const { open, settled } = toSettle({
         costs,
         coordinator,
-        decisionDate: sheet.round.decisionDate,
+        round: sheet.round,
         assessors: sheet.assessors,
         unscoredCandidateIds: unscored(sheet),
         spreads: spreadsOf(sheet),

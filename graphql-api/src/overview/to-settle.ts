@@ -3,15 +3,18 @@ import { WIDE_SPREAD_POINTS } from '@metewand/scoring';
 import type { Candidate } from '../candidates/entities/candidate.entity.js';
 import type { LinkWithMembers } from '../candidates/links.service.js';
 import { LinkKind } from '../candidates/entities/link.entity.js';
+import { dayInWords } from '../common/words.js';
 import type { RoundCosts, UnpricedCandidate } from '../costing/round-costs.service.js';
 import type { Membership } from '../memberships/entities/membership.entity.js';
 import type { AssessorProgress } from '../scoring/models/score-sheet.model.js';
+import { faultWords } from '../quotes/fault-words.js';
+import type { Round } from '../rounds/entities/round.entity.js';
 import type { Spread } from './score-spreads.js';
 import { ToSettleKind, type ToSettle } from './models/round-overview.model.js';
 
 export interface OverviewFacts {
   costs: RoundCosts;
-  decisionDate: string;
+  round: Round;
   /** Who settles what is wrong with quotes. */
   coordinator: Membership | null;
   assessors: readonly AssessorProgress[];
@@ -48,14 +51,14 @@ export function toSettle(facts: OverviewFacts): { open: ToSettle[]; settled: num
   return { open, settled: facts.costs.priced.length + checks.length - open.length };
 }
 
-function withoutQuote({ costs, coordinator, decisionDate }: OverviewFacts): ToSettle[] {
+function withoutQuote({ costs, coordinator, round }: OverviewFacts): ToSettle[] {
   const mandatoryFirst = [...costs.unpriced].sort(
     (one, other) => Number(other.candidate.mandatory) - Number(one.candidate.mandatory),
   );
   return mandatoryFirst.map((each) => ({
     kind: ToSettleKind.NO_OPEN_QUOTE,
-    title: `${label(each.candidate)} has no quote open on ${decisionDate}`,
-    detail: [each.candidate.mandatory && 'It is mandatory and would be left out', whatIsWrong(each)]
+    title: `${label(each.candidate)} has no quote open on ${dayInWords(round.decisionDate)}`,
+    detail: [each.candidate.mandatory && 'It is mandatory and would be left out', whatIsWrong(each, round)]
       .filter(Boolean)
       .join('. '),
     by: coordinator,
@@ -63,18 +66,15 @@ function withoutQuote({ costs, coordinator, decisionDate }: OverviewFacts): ToSe
   }));
 }
 
-function whatIsWrong({ quotes }: UnpricedCandidate): string {
+function whatIsWrong({ quotes }: UnpricedCandidate, round: Round): string {
   if (quotes.length === 0) return 'It has no quote yet';
   return quotes
-    .map(({ quote, faults }) => `${quote.number} ${faults.map((fault) => FAULTS[fault]).join(', ')}`)
+    .map(
+      ({ quote, faults }) =>
+        `${quote.number}: ${faults.map((fault) => faultWords(fault, quote, round)).join(', ')}`,
+    )
     .join('; ');
 }
-
-const FAULTS: Record<QuoteFault, string> = {
-  RUN_OUT: 'runs out before',
-  SERVICE_PRICE_MISSING: 'has no service price',
-  LEAD_TIME_TOO_LONG: 'takes too long to arrive',
-};
 
 /** Only where another quote is in force: without one the candidate has a line of its own already. */
 function quotesWithFault(

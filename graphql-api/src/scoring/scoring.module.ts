@@ -1,4 +1,4 @@
-import { Global, Module } from '@nestjs/common';
+import { Module } from '@nestjs/common';
 import { TypeOrmModule } from '@nestjs/typeorm';
 import { AuditModule } from '../audit/audit.module.js';
 import { CandidateBenefits } from '../candidates/candidate-benefits.js';
@@ -18,8 +18,6 @@ import { ScoresService } from './scores.service.js';
 import { ScoringReadiness } from './scoring-readiness.js';
 import { WeightByCriterionLoader } from './weight-by-criterion.loader.js';
 
-/** Global only for what the candidates' table asks of it: an earlier feature cannot import a later one. */
-@Global()
 @Module({
   imports: [TypeOrmModule.forFeature([Criterion, Score]), AuditModule, MembershipsModule, RoundsModule],
   providers: [
