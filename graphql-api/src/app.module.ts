@@ -20,6 +20,7 @@ import { OverviewModule } from './overview/overview.module.js';
 import { QuotesModule } from './quotes/quotes.module.js';
 import { RoundsModule } from './rounds/rounds.module.js';
 import { ScoringModule } from './scoring/scoring.module.js';
+import { SelectionsModule } from './selections/selections.module.js';
 import { TenancyModule } from './tenancy/tenancy.module.js';
 import { HealthController } from './web-host/health.controller.js';
 
@@ -44,6 +45,7 @@ import { HealthController } from './web-host/health.controller.js';
     ScoringModule,
     OverviewModule,
     FrontierModule,
+    SelectionsModule,
   ],
   providers: [DecimalScalar, CalendarDateScalar, DateTimeScalar],
   controllers: [HealthController],
