@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { In, type EntityManager } from 'typeorm';
-import { costOfQuote, quoteFaults, type CostAssumptions } from '@metewand/costing';
+import { quoteFaults, type CostAssumptions } from '@metewand/costing';
 import type { Candidate } from '../candidates/entities/candidate.entity.js';
 import { groupByKey } from '../common/request-loader.js';
 import { OrganisationsService } from '../organisations/organisations.service.js';
@@ -8,6 +8,7 @@ import { Quote } from '../quotes/entities/quote.entity.js';
 import { quoteInForce, type JudgedQuote, type QuoteInForce } from '../quotes/quote-in-force.js';
 import { ExchangeRate } from '../rounds/entities/exchange-rate.entity.js';
 import { Round } from '../rounds/entities/round.entity.js';
+import { costOf } from './cost-memo.js';
 
 /** A candidate with all its quotes, costed and judged, and the one by which it counts. */
 export interface CostedCandidate {
@@ -68,5 +69,5 @@ function assumptionsOf(round: Round, rates: readonly ExchangeRate[], currency: s
 }
 
 function judge(quote: Quote, candidate: Candidate, { round, assumptions }: RoundTerms): JudgedQuote {
-  return { quote, faults: quoteFaults(quote, round), cost: costOfQuote(quote, candidate, assumptions) };
+  return { quote, faults: quoteFaults(quote, round), cost: costOf(quote, candidate, assumptions) };
 }
