@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import { fileTypeFromBuffer } from 'file-type';
+import { fileTypeFromBuffer } from 'file-type/core';
 import { CSV } from './file-rules.js';
 
 /** Whether the bytes are what the content type says: magic bytes, or for CSV text in UTF-8 that is nothing else. */
