@@ -78,11 +78,13 @@ function idPaths(path: string, input: GraphQLInputType): string[] {
 
 /** A sound value for every argument; `idFor` says which id belongs at a path. */
 export function variablesFor(operation: Operation, idFor: (path: string) => string): Record<string, unknown> {
-  return Object.fromEntries(operation.field.args.map((arg) => [arg.name, sample(arg.name, arg.type, idFor)]));
+  const text = `text of ${operation.name}`;
+  return Object.fromEntries(
+    operation.field.args.map((arg) => [arg.name, sample(arg.name, arg.type, idFor, text)]),
+  );
 }
 
 const SAMPLES: Record<string, unknown> = {
-  String: 'sample text',
   Int: 1,
   Float: 1,
   Boolean: false,
@@ -97,21 +99,27 @@ const SOUND: Record<string, unknown> = {
   currency: 'EUR',
   contentType: 'application/pdf',
   fileName: 'quote.pdf',
-  after: '1',
+  after: '999999',
+  search: '',
 };
 
-function sample(path: string, input: GraphQLInputType, idFor: (path: string) => string): unknown {
-  if (isNonNullType(input)) return sample(path, input.ofType, idFor);
-  if (isListType(input)) return [sample(path, input.ofType, idFor)];
+function sample(
+  path: string,
+  input: GraphQLInputType,
+  idFor: (path: string) => string,
+  text: string,
+): unknown {
+  if (isNonNullType(input)) return sample(path, input.ofType, idFor, text);
+  if (isListType(input)) return [sample(path, input.ofType, idFor, text)];
   if (isInputObjectType(input)) {
     const fields = Object.values(input.getFields());
     return Object.fromEntries(
-      fields.map((field) => [field.name, sample(`${path}.${field.name}`, field.type, idFor)]),
+      fields.map((field) => [field.name, sample(`${path}.${field.name}`, field.type, idFor, text)]),
     );
   }
   if (isEnumType(input)) return input.getValues()[0].name;
   if (input.name === 'ID') return idFor(path);
-  const value = SOUND[path.split('.').at(-1) ?? ''] ?? SAMPLES[input.name];
+  const value = SOUND[path.split('.').at(-1) ?? ''] ?? (input.name === 'String' ? text : SAMPLES[input.name]);
   if (value === undefined) throw new Error(`No sample for ${path} of type ${input.name}.`);
   return value;
 }
