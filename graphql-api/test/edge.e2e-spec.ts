@@ -14,16 +14,24 @@ const INSIDES = /at \w+.*\.(ts|js):\d+|select |insert |node_modules|\/src\/|Quer
 
 describe('the edge of the API', () => {
   it.each([
-    ['deeper than ten levels', `{ viewer { rounds ${nested(6)} } }`],
-    ['with more than thirty aliases', `{ ${times(31, (n) => `a${n}: viewer { email }`)} }`],
-    ['with more than fifty directives', `{ viewer { email ${times(51, () => '@include(if: true)')} } }`],
-    ['with more than five thousand tokens', `{ viewer { ${times(5001, () => 'email')} } }`],
-    ['that does not parse', '{ viewer { '],
-    ['for a field that does not exist', '{ viewer { emial } }'],
-  ])('refuses a query %s, before running it and without hints', async (_case, query) => {
+    ['deeper than ten levels', `{ viewer { rounds ${nested(6)} } }`, /depth limit/],
+    [
+      'with more than thirty aliases',
+      `{ ${times(31, (n) => `a${n}: viewer { email }`)} }`,
+      /[Aa]liases limit/,
+    ],
+    [
+      'with more than fifty directives',
+      `{ viewer { email ${times(51, () => '@include(if: true)')} } }`,
+      /[Dd]irectives limit/,
+    ],
+    ['with more than five thousand tokens', `{ viewer { ${times(5001, () => 'email')} } }`, /[Tt]oken limit/],
+    ['that does not parse', '{ viewer { ', /Syntax Error/],
+    ['for a field that does not exist', '{ viewer { emial } }', /Cannot query field/],
+  ])('refuses a query %s, before running it and without hints', async (_case, query, reason) => {
     const { data, errors } = await member.ask(query);
     expect(data).toBeUndefined();
-    expect(errors?.length).toBeGreaterThan(0);
+    expect(errors?.[0].message).toMatch(reason);
     expect(JSON.stringify(errors)).not.toMatch(INSIDES);
     expect(JSON.stringify(errors)).not.toMatch(/did you mean/i);
   });
