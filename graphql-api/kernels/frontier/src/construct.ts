@@ -52,7 +52,7 @@ function limitPrices(model: Model, { price, limitShare }: StartWeights): Float64
   const budget =
     model.ceiling < Infinity ? model.ceiling : model.optionCost.reduce((sum, cost) => sum + cost, 0);
   return Float64Array.from(model.rows, ({ kind }, row) =>
-    kind === 'limit most' ? (limitShare * price * budget) / model.rowScale[row] : 0,
+    kind === 'limit most' ? limitShare * price * budget * model.rowWeight[row] : 0,
   );
 }
 

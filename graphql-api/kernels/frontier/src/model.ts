@@ -22,8 +22,8 @@ export interface Model {
 
   readonly rows: readonly Row[];
   readonly rowMost: Float64Array;
-  /** What counts as one unit of excess when excesses of different rows are added up. */
-  readonly rowScale: Float64Array;
+  /** By what an excess counts when excesses of different rows are added up: about one over the row's bound. */
+  readonly rowWeight: Float64Array;
   /** The entries of an option are those from termStart[option] up to termStart[option + 1]. */
   readonly termStart: Int32Array;
   readonly termRow: Int32Array;

@@ -10,7 +10,7 @@ export interface Row {
   readonly sign: 1 | -1;
 }
 
-type CompiledRows = Pick<Model, 'rows' | 'rowMost' | 'rowScale' | 'termStart' | 'termRow' | 'termValue'>;
+type CompiledRows = Pick<Model, 'rows' | 'rowMost' | 'rowWeight' | 'termStart' | 'termRow' | 'termValue'>;
 
 /** All limits and links but the ceiling as sparse rows over options; rows that no choice can break are left away. */
 export function compileRows(problem: Problem, options: OptionList): CompiledRows {
@@ -31,11 +31,16 @@ export function compileRows(problem: Problem, options: OptionList): CompiledRows
   return {
     rows: drafts.map(({ kind, name, sign }) => ({ kind, name, sign })),
     rowMost: Float64Array.from(drafts, (draft) => draft.most),
-    rowScale: Float64Array.from(drafts, (draft) => Math.max(1, Math.abs(draft.most))),
+    rowWeight: Float64Array.from(drafts, (draft) => weightOf(draft.most)),
     termStart,
     termRow: Int32Array.from(terms, ([row]) => row),
     termValue: Float64Array.from(terms, ([, value]) => value),
   };
+}
+
+/** About one over the bound, as a power of two, so that excesses can be added and taken back without rounding. */
+function weightOf(most: number): number {
+  return 2 ** -Math.ceil(Math.log2(Math.max(1, Math.abs(most))));
 }
 
 interface DraftRow extends Row {

@@ -1,0 +1,46 @@
+import { violationsOf } from '../src/feasible.js';
+import { parseProblem } from '../src/parse-problem.js';
+import { bruteForceFront } from './brute-force.js';
+import exactFront from './demo-exact-front.json' with { type: 'json' };
+import demoProblems from './demo-problems.json' with { type: 'json' };
+import { pointsOf, runToEnd } from './run-search.js';
+
+/**
+ * The two invented organisations of the demo round: money in minor units, benefit in ten-thousandths of a point.
+ * The best portfolios and the 853 points of the first front were worked out by an independent solver (HiGHS, cost
+ * step by cost step).
+ */
+describe('the demo round, with the default seed and budget', () => {
+  it('finds the best portfolio of the first organisation and nearly all of its front', () => {
+    const problem = parseProblem(demoProblems.firstOrganisation);
+    const result = runToEnd(problem);
+    expect(result.points.at(-1)).toMatchObject({ benefit: 8_187_213, cost: 230_055_600 });
+
+    const exact = new Set(exactFront.map(String));
+    const found = pointsOf(result).filter((point) => exact.has(String(point)));
+    expect(exact.size).toBe(853);
+    expect(found.length).toBeGreaterThanOrEqual(845);
+    for (const { picks } of result.points) expect(violationsOf(problem, picks)).toEqual([]);
+  });
+
+  it('does not owe that to its seed', () => {
+    const problem = parseProblem(demoProblems.firstOrganisation);
+    const result = runToEnd(problem, { seed: 20_270_215, evaluations: 12_000_000 });
+    expect(result.points.at(-1)).toMatchObject({ benefit: 8_187_213, cost: 230_055_600 });
+  });
+
+  it('finds the whole front of the second organisation with its quotes as they stand', () => {
+    const problem = parseProblem(demoProblems.secondOrganisationAsQuoted);
+    const result = runToEnd(problem);
+    expect(result.points.at(-1)).toMatchObject({ benefit: 3_089_540, cost: 36_080_040 });
+    expect(result.points).toHaveLength(48);
+    expect(pointsOf(result)).toEqual(bruteForceFront(problem));
+  });
+
+  it('finds the whole front of the second organisation with both run-out quotes extended', () => {
+    const problem = parseProblem(demoProblems.secondOrganisationExtended);
+    const result = runToEnd(problem);
+    expect(result.points.at(-1)).toMatchObject({ benefit: 3_114_885, cost: 35_846_040 });
+    expect(pointsOf(result)).toEqual(bruteForceFront(problem));
+  });
+});

@@ -1,0 +1,40 @@
+import { totalsOf, violationsOf } from '../src/feasible.js';
+import { parseProblem } from '../src/parse-problem.js';
+import { bruteForceFront } from './brute-force.js';
+import { pointsOf, runToEnd } from './run-search.js';
+import { aRandomProblem } from './seeded.js';
+
+const seeds = (count: number): number[] => Array.from({ length: count }, (_, index) => index + 1);
+
+describe('problems drawn at random, every kind of limit and link at once', () => {
+  it('has the exact front of each small one', () => {
+    let feasible = 0;
+    for (const seed of seeds(120)) {
+      const problem = parseProblem(aRandomProblem(seed, 4 + (seed % 6)));
+      const exact = bruteForceFront(problem);
+      const result = runToEnd(problem, { seed });
+      expect({ seed, front: pointsOf(result) }).toEqual({ seed, front: exact });
+      if (result.status === 'infeasible') expect(exact).toEqual([]);
+      if (exact.length > 0) feasible++;
+      else expect(result.notes.length).toBeGreaterThan(0);
+    }
+    expect(feasible).toBeGreaterThan(60);
+  });
+
+  it('gives only feasible portfolios, with their true sums, of which none beats another', () => {
+    let points = 0;
+    for (const seed of seeds(30)) {
+      const problem = parseProblem(aRandomProblem(seed, 40));
+      const result = runToEnd(problem, { seed, evaluations: 200_000 });
+      for (const [place, { picks, benefit, cost }] of result.points.entries()) {
+        expect(violationsOf(problem, picks)).toEqual([]);
+        expect(totalsOf(problem, picks)).toMatchObject({ benefit, cost });
+        if (place === 0) continue;
+        expect(cost).toBeGreaterThan(result.points[place - 1].cost);
+        expect(benefit).toBeGreaterThan(result.points[place - 1].benefit);
+      }
+      points += result.points.length;
+    }
+    expect(points).toBeGreaterThan(500);
+  });
+});
