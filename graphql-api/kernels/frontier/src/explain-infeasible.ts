@@ -2,69 +2,83 @@ import { countName } from './feasible.js';
 import { propagate, type Settled } from './propagate.js';
 import type { Item, Problem } from './problem.js';
 
+/** Writes a figure for a person: whole numbers are in the units of whoever wrote the problem. Pieces are not asked. */
+export type WriteFigure = (figure: number, of: 'cost' | 'benefit' | { readonly limit: string }) => string;
+
 /**
  * Why no portfolio can keep every limit and link, one sentence per reason with the names of what collides and by how
  * much. An empty list proves nothing: the reasons looked for are those that follow from the mandatory items, the
  * links and one limit or count at a time.
  */
-export function explainInfeasible(problem: Problem): string[] {
+export function explainInfeasible(problem: Problem, write: WriteFigure = String): string[] {
   const settled = propagate(problem);
   if (settled.collisions.length > 0) return settled.collisions;
   return [
-    ...ceilingReasons(problem, settled),
-    ...limitReasons(problem, settled),
+    ...ceilingReasons(problem, settled, write),
+    ...limitReasons(problem, settled, write),
     ...countReasons(problem, settled),
-    ...benefitReasons(problem, settled),
+    ...benefitReasons(problem, settled, write),
   ];
 }
 
-function* ceilingReasons(problem: Problem, settled: Settled): Generator<string> {
+function* ceilingReasons(problem: Problem, settled: Settled, write: WriteFigure): Generator<string> {
   if (problem.ceiling === undefined) return;
-  const cost = (item: Item): number => item.cost;
-  yield* overBound(problem, settled, cost, 'cost', 'the ceiling', problem.ceiling);
+  const figure = (item: Item): number => item.cost;
+  const asText = (cost: number): string => write(cost, 'cost');
+  const bound = { name: 'cost', boundName: 'the ceiling', most: problem.ceiling, figure, asText };
+  yield* overBound(problem, settled, bound);
 }
 
-function* limitReasons(problem: Problem, settled: Settled): Generator<string> {
+function* limitReasons(problem: Problem, settled: Settled, write: WriteFigure): Generator<string> {
   for (const [index, { name, most, least }] of (problem.limits ?? []).entries()) {
-    const use = (item: Item): number => item.uses?.[index] ?? 0;
-    yield* overBound(problem, settled, use, name, 'its limit', most);
-    const highest = reach(settled, use).highest;
+    const figure = (item: Item): number => item.uses?.[index] ?? 0;
+    const asText = (use: number): string => write(use, { limit: name });
+    yield* overBound(problem, settled, { name, boundName: 'its limit', most, figure, asText });
+    const highest = reach(settled, figure).highest;
     if (least !== undefined && highest < least) {
-      yield `${name} comes to ${highest} at most, ${least - highest} under its least of ${least}.`;
+      yield `${name} comes to ${asText(highest)} at most, ${asText(least - highest)} under its least of ${asText(least)}.`;
     }
   }
 }
 
-function* benefitReasons(problem: Problem, settled: Settled): Generator<string> {
+function* benefitReasons(problem: Problem, settled: Settled, write: WriteFigure): Generator<string> {
   const least = problem.leastBenefit ?? 0;
   const highest = reach(settled, (item) => item.benefit).highest;
-  if (highest < least)
-    yield `All that may be taken brings a benefit of ${highest} at most, under the least of ${least}.`;
+  if (highest >= least) return;
+  const [most, asked] = [write(highest, 'benefit'), write(least, 'benefit')];
+  yield `All that may be taken brings a benefit of ${most} at most, under the least of ${asked}.`;
+}
+
+/** A bound from above on the sum of a figure, and how to speak of it. */
+interface UpperBound {
+  readonly name: string;
+  readonly boundName: string;
+  readonly most: number;
+  readonly figure: (item: Item) => number;
+  readonly asText: (figure: number) => string;
 }
 
 /** First what must be taken on its own, then together with the cheapest way to fill each count. */
 function* overBound(
   problem: Problem,
   settled: Settled,
-  figure: (item: Item) => number,
-  name: string,
-  boundName: string,
-  bound: number,
+  { name, boundName, most, figure, asText }: UpperBound,
 ): Generator<string> {
   const lowest = reach(settled, figure).lowest;
-  if (lowest > bound) {
+  if (lowest > most) {
     const forced = problem.items.filter(({ id }) => settled.forced.has(id)).map(({ id }) => id);
     const who =
       forced.length > 0 ? `What must be taken (${forced.join(', ')})` : 'Even the least that may be taken';
-    yield `${who} brings ${name} to ${lowest} at least, ${lowest - bound} over ${boundName} of ${bound}.`;
+    yield `${who} brings ${name} to ${asText(lowest)} at least, ${asText(lowest - most)} over ${boundName} of ${asText(most)}.`;
     return;
   }
   if (problem.items.some((item) => figure(item) < 0)) return;
   for (const count of problem.counts ?? []) {
     const extra = leastToFill(settled, figure, count.items, count.least ?? 0);
-    if (lowest + extra <= bound) continue;
-    const over = lowest + extra - bound;
-    yield `What must be taken and ${count.least} pieces of ${countName(count)} bring ${name} to ${lowest + extra} at least, ${over} over ${boundName} of ${bound}.`;
+    const together = lowest + extra;
+    if (together <= most) continue;
+    const who = `What must be taken and ${count.least} pieces of ${countName(count)}`;
+    yield `${who} bring ${name} to ${asText(together)} at least, ${asText(together - most)} over ${boundName} of ${asText(most)}.`;
   }
 }
 

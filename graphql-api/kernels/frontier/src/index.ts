@@ -1,5 +1,5 @@
 export { canonicalText } from './canonical-text.js';
-export { explainInfeasible } from './explain-infeasible.js';
+export { explainInfeasible, type WriteFigure } from './explain-infeasible.js';
 export {
   describeViolation,
   totalsOf,

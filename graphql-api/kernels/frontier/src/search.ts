@@ -2,6 +2,7 @@ import { explainInfeasible } from './explain-infeasible.js';
 import type { Picks } from './feasible.js';
 import { LocalSearch } from './local-search.js';
 import { compile, type Model } from './model.js';
+import type { ParetoFront } from './pareto-front.js';
 import { ProblemError } from './problem-error.js';
 import type { Problem } from './problem.js';
 import type { SearchArchive } from './search-archive.js';
@@ -27,6 +28,8 @@ export interface SearchProgress {
   readonly bestBenefit: number | undefined;
   /** The front so far as [cost, benefit], in order of cost. */
   points(): [cost: number, benefit: number][];
+  /** The same with what each portfolio takes. */
+  portfolios(): FrontierPoint[];
 }
 
 /** Send it with `next` to end the search: the next step is the last and brings what was found. */
@@ -79,7 +82,7 @@ export function* searchFrontier(
   while (!stopped && archive.evaluations < of) {
     const pause = Math.min(of, archive.evaluations + reportEvery);
     while (archive.evaluations < pause) search.step(pause - archive.evaluations);
-    stopped = (yield progressOf(archive, of))?.stop ?? false;
+    stopped = (yield progressOf(archive, model, of))?.stop ?? false;
   }
   return resultOf(search, model, seed, stopped && archive.evaluations < of);
 }
@@ -99,16 +102,21 @@ function refuseSecondCost(problem: Problem): void {
   }
 }
 
-function progressOf({ front, evaluations }: SearchArchive, of: number): SearchProgress {
+function progressOf({ front, evaluations }: SearchArchive, model: Model, of: number): SearchProgress {
   const bestBenefit = front.size > 0 ? front.benefitAt(front.size - 1) : undefined;
-  return { evaluations, of, kept: front.size, bestBenefit, points: () => front.points() };
+  const portfolios = (): FrontierPoint[] => portfoliosOf(front, model);
+  return { evaluations, of, kept: front.size, bestBenefit, points: () => front.points(), portfolios };
+}
+
+function portfoliosOf(front: ParetoFront, model: Model): FrontierPoint[] {
+  return front.points().map(([cost, benefit], place) => {
+    return { benefit, cost, picks: picksOf(model, front.choicesAt(place)) };
+  });
 }
 
 function resultOf(search: LocalSearch, model: Model, seed: number, stopped: boolean): SearchResult {
   const { front, lookedAt, onceKept, evaluations } = search.archive;
-  const points = front.points().map(([cost, benefit], place) => {
-    return { benefit, cost, picks: picksOf(model, front.choicesAt(place)) };
-  });
+  const points = portfoliosOf(front, model);
   return {
     status: 'unproven',
     stopped,

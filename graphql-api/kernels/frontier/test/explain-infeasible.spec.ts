@@ -104,6 +104,13 @@ describe('a problem that no portfolio can meet', () => {
     expect(runToEnd(problem)).toMatchObject({ status: 'infeasible', points: [], notes: [reason] });
   });
 
+  it('is explained in the units of the host', () => {
+    const problem = aProblem(['bed', 'lamp'], { ceiling: 15, mustInclude: ['bed', 'lamp'] });
+    expect(explainInfeasible(problem, (figure, of) => `${figure / 100} of ${String(of)}`)).toEqual([
+      'What must be taken (bed, lamp) brings cost to 0.2 of cost at least, 0.05 of cost over the ceiling of 0.15 of cost.',
+    ]);
+  });
+
   it('has no reason where there is a portfolio', () => {
     expect(explainInfeasible(twoNeedsAndAHoist())).toEqual([]);
   });

@@ -63,6 +63,7 @@ describe('a search', () => {
       expect(progress.evaluations).toBeGreaterThan(doneBefore);
       expect(progress.bestBenefit).toBeGreaterThanOrEqual(bestBefore);
       expect(progress.points()).toHaveLength(progress.kept);
+      expect(progress.portfolios().map(({ cost, benefit }) => [cost, benefit])).toEqual(progress.points());
       bestBefore = progress.bestBenefit ?? 0;
       doneBefore = progress.evaluations;
     });
