@@ -1,7 +1,8 @@
 import type { ButtonHTMLAttributes, ReactNode, Ref } from 'react';
-import { Button as PrimerButton, IconButton as PrimerIconButton } from '@primer/react';
+import { Button as PrimerButton } from '@primer/react';
 import { Link } from 'react-router-dom';
 import type { LinkProps } from 'react-router-dom';
+import styled from 'styled-components';
 import { Icon } from './icon';
 import type { IconName } from './icon';
 
@@ -72,15 +73,25 @@ interface IconButtonProps extends Omit<
   ref?: Ref<HTMLButtonElement>;
 }
 
-export function IconButton({ icon, label, variant = 'default', size = 'small', ...rest }: IconButtonProps) {
+export function IconButton({
+  icon,
+  label,
+  variant = 'default',
+  size = 'small',
+  type = 'button',
+  ...rest
+}: IconButtonProps) {
   return (
-    <PrimerIconButton
-      icon={() => <Icon name={icon} />}
+    <Square
       aria-label={label}
+      title={label}
       variant={primerVariant(variant)}
       size={size}
+      type={type}
       {...rest}
-    />
+    >
+      <Icon name={icon} />
+    </Square>
   );
 }
 
@@ -90,7 +101,13 @@ function primerVariant(variant: NonNullable<Look['variant']>) {
 
 function visuals(icon?: IconName, trailingIcon?: IconName) {
   return {
-    leadingVisual: icon && (() => <Icon name={icon} />),
-    trailingVisual: trailingIcon && (() => <Icon name={trailingIcon} />),
+    leadingVisual: icon && <Icon name={icon} />,
+    trailingVisual: trailingIcon && <Icon name={trailingIcon} />,
   };
 }
+
+const Square = styled(PrimerButton)`
+  flex: none;
+  padding: 0;
+  aspect-ratio: 1;
+`;

@@ -72,7 +72,7 @@ export function TextField({ label, help, error, labelAside, icon, unit, size, ..
           block
           size={size}
           validationStatus={error ? 'error' : undefined}
-          leadingVisual={icon && (() => <Icon name={icon} />)}
+          leadingVisual={icon && <Icon name={icon} />}
           trailingVisual={unit}
           {...input}
           {...wiring}

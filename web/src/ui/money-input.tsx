@@ -31,6 +31,7 @@ export function MoneyInput({
   const [typed, setTyped] = useState(() =>
     defaultValue ? formatAmount({ amount: defaultValue, currency }) : '',
   );
+  const [changed, setChanged] = useState(false);
   const [left, setLeft] = useState(false);
   const read = readAmount(typed, minorDigits(currency));
   const amount = 'amount' in read ? read.amount : '';
@@ -38,6 +39,7 @@ export function MoneyInput({
 
   function change(text: string) {
     setTyped(text);
+    setChanged(true);
     const next = readAmount(text, minorDigits(currency));
     onAmount?.('amount' in next ? next.amount : '');
   }
@@ -52,7 +54,7 @@ export function MoneyInput({
         unit={currencySign(currency)}
         required={required}
         error={problem ?? error}
-        help={amount ? `Read as ${formatMoney({ amount, currency })}` : help}
+        help={changed && amount ? `Read as ${formatMoney({ amount, currency })}` : help}
         onChange={(event) => change(event.target.value)}
         onBlur={() => setLeft(true)}
       />

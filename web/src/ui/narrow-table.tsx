@@ -110,6 +110,10 @@ const Title = styled.div`
   flex-wrap: wrap;
   gap: 0 8px;
   font-weight: 600;
+  a {
+    color: inherit;
+    text-decoration: none;
+  }
 `;
 
 const End = styled.div`

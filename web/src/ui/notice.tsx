@@ -24,10 +24,10 @@ export function Notice({ tone, title, children, actions, alert = false }: Notice
   return (
     <Box $tone={tone} role={alert ? 'alert' : undefined}>
       <Icon name={ICONS[tone]} size={18} />
-      <div>
+      <Words>
         <Title>{title}</Title>
         {children && <Text>{children}</Text>}
-      </div>
+      </Words>
       {actions && <Actions>{actions}</Actions>}
     </Box>
   );
@@ -52,10 +52,11 @@ const Box = styled.div<{ $tone: Tone }>`
     margin-top: 1px;
     color: var(${({ $tone }) => COLOURS[$tone][0]});
   }
-  > div {
-    flex: 1;
-    min-width: min(100%, 200px);
-  }
+`;
+
+const Words = styled.div`
+  flex: 1;
+  min-width: min(100%, 200px);
 `;
 
 const Title = styled.p`
@@ -71,5 +72,4 @@ const Actions = styled.div`
   display: flex;
   flex-wrap: wrap;
   gap: 8px;
-  flex: none !important;
 `;

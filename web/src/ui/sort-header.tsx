@@ -29,6 +29,7 @@ export function SortHeader<Row>({ column, sort, onSort }: SortHeaderProps<Row>) 
       <Press
         type="button"
         $sorted={Boolean(sorted)}
+        $end={column.align === 'end'}
         onClick={() => onSort({ id: column.id, direction: next(column, sorted) })}
       >
         {column.header}
@@ -43,8 +44,9 @@ function next<Row>(column: Column<Row>, sorted: Sort['direction'] | undefined): 
   return sorted === 'asc' ? 'desc' : 'asc';
 }
 
-const Press = styled.button<{ $sorted: boolean }>`
+const Press = styled.button<{ $sorted: boolean; $end: boolean }>`
   display: inline-flex;
+  flex-direction: ${({ $end }) => ($end ? 'row-reverse' : 'row')};
   align-items: center;
   gap: 3px;
   height: 28px;

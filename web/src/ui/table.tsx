@@ -142,6 +142,13 @@ const Grid = styled.table`
   tbody th {
     font-weight: 600;
   }
+  tbody th a {
+    color: inherit;
+    text-decoration: none;
+  }
+  tbody th a:hover {
+    text-decoration: underline;
+  }
   thead th {
     height: 34px;
     font-size: 12px;

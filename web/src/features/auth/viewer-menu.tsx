@@ -1,10 +1,10 @@
-import { ActionList, ActionMenu } from '@primer/react';
 import styled from 'styled-components';
 import { roleNames } from '../../lib/roles';
 import { chooseTheme, useTheme } from '../../lib/theme';
 import type { Theme } from '../../lib/theme';
 import { useViewer } from '../../lib/viewer';
 import { Initials } from '../../ui/initials';
+import { Menu } from '../../ui/menu';
 import { useSignOut } from './use-sign-out';
 
 const THEMES: readonly [Theme, string][] = [
@@ -19,34 +19,34 @@ export function ViewerMenu() {
   const theme = useTheme();
   const signOut = useSignOut();
   return (
-    <ActionMenu>
-      <ActionMenu.Anchor>
-        <Me type="button" aria-label={`${membership.name}, your menu`}>
+    <Menu
+      side="outside-top"
+      groups={[
+        {
+          id: 'theme',
+          heading: 'Theme',
+          items: THEMES.map(([value, name]) => ({
+            id: value,
+            name,
+            selected: theme === value,
+            onSelect: () => chooseTheme(value),
+          })),
+        },
+        {
+          id: 'session',
+          items: [{ id: 'sign-out', name: 'Sign out', detail: email, onSelect: () => void signOut() }],
+        },
+      ]}
+      anchor={(props) => (
+        <Me {...props} aria-label={`${membership.name}, your menu`}>
           <Initials name={membership.name} />
           <Text>
             <b>{membership.name}</b>
             <span>{membership.title || roleNames(membership.roles)}</span>
           </Text>
         </Me>
-      </ActionMenu.Anchor>
-      <ActionMenu.Overlay width="small" side="outside-top">
-        <ActionList>
-          <ActionList.Group selectionVariant="single">
-            <ActionList.GroupHeading>Theme</ActionList.GroupHeading>
-            {THEMES.map(([value, name]) => (
-              <ActionList.Item key={value} selected={theme === value} onSelect={() => chooseTheme(value)}>
-                {name}
-              </ActionList.Item>
-            ))}
-          </ActionList.Group>
-          <ActionList.Divider />
-          <ActionList.Item onSelect={() => void signOut()}>
-            Sign out
-            <ActionList.Description variant="block">{email}</ActionList.Description>
-          </ActionList.Item>
-        </ActionList>
-      </ActionMenu.Overlay>
-    </ActionMenu>
+      )}
+    />
   );
 }
 

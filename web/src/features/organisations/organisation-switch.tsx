@@ -1,10 +1,10 @@
-import { ActionList, ActionMenu } from '@primer/react';
 import styled from 'styled-components';
 import { errorMessage } from '../../lib/error-code';
 import { roleNames } from '../../lib/roles';
 import { useViewer } from '../../lib/viewer';
 import { announce } from '../../ui/announce';
 import { Icon } from '../../ui/icon';
+import { Menu } from '../../ui/menu';
 import { useSwitchOrganisation } from './use-switch-organisation';
 
 /** The clinic group at work; a menu for members of several. */
@@ -28,28 +28,27 @@ export function OrganisationSwitch({ onSwitched }: { onSwitched: () => void }) {
     }
   }
   return (
-    <ActionMenu>
-      <ActionMenu.Anchor>
-        <Box type="button" aria-label={`Clinic group: ${organisation.name}`}>
+    <Menu
+      width="medium"
+      groups={[
+        {
+          id: 'organisations',
+          items: memberships.map((choice) => ({
+            id: choice.organisationId,
+            name: choice.organisationName,
+            detail: roleNames(choice.roles),
+            selected: choice.organisationId === organisation.id,
+            onSelect: () => void choose(choice.organisationId),
+          })),
+        },
+      ]}
+      anchor={(props) => (
+        <Box {...props} aria-label={`Clinic group: ${organisation.name}`}>
           <Name name={organisation.name} sites={organisation.sites.length} demo={organisation.demo} />
           <Icon name="down" />
         </Box>
-      </ActionMenu.Anchor>
-      <ActionMenu.Overlay width="medium">
-        <ActionList selectionVariant="single">
-          {memberships.map((choice) => (
-            <ActionList.Item
-              key={choice.organisationId}
-              selected={choice.organisationId === organisation.id}
-              onSelect={() => void choose(choice.organisationId)}
-            >
-              {choice.organisationName}
-              <ActionList.Description variant="block">{roleNames(choice.roles)}</ActionList.Description>
-            </ActionList.Item>
-          ))}
-        </ActionList>
-      </ActionMenu.Overlay>
-    </ActionMenu>
+      )}
+    />
   );
 }
 
