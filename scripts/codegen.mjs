@@ -5,34 +5,48 @@ import { join } from 'node:path';
 import { root } from './root.mjs';
 import { generateWebTypes } from './web-types.mjs';
 
-// Emits schema/schema.graphql and schema/roles.json from the compiled API, then the types of the web from the schema.
+// Emits schema/schema.graphql and schema/roles.json from the compiled API, and the types of the web from the schema.
 // With --check the committed files stay as they are, and a difference fails.
 
 const emitted = ['schema.graphql', 'roles.json'];
 
-const different = withFreshlyEmitted((file, fresh) => {
-  const path = join(root, 'schema', file);
-  const same = existsSync(path) && readFileSync(path, 'utf8') === fresh;
-  if (!same && !process.argv.includes('--check')) writeFileSync(path, fresh);
-  return !same;
-});
-const { operations, written } = await generateWebTypes();
-console.log(`${operations} GraphQL documents of the web, ${written.length} generated files changed`);
+if (process.argv.includes('--check')) {
+  await typesOfTheWeb();
+  for (const { file } of differences())
+    complain(`schema/${file} is out of date; bring it up to date: npm run codegen`);
+} else {
+  for (const { file, path, fresh } of differences()) {
+    writeFileSync(path, fresh);
+    console.log(`schema/${file} has changed`);
+  }
+  await typesOfTheWeb();
+}
 
-for (const file of different)
-  console.log(
-    `schema/${file} ${process.argv.includes('--check') ? 'is out of date: npm run codegen' : 'has changed'}`,
-  );
-if (process.argv.includes('--check') && different.length > 0) process.exitCode = 1;
+async function typesOfTheWeb() {
+  const { operations, written } = await generateWebTypes();
+  console.log(`${operations} GraphQL documents of the web, ${written.length} generated files changed`);
+}
 
-function withFreshlyEmitted(differs) {
+function complain(sentence) {
+  console.error(sentence);
+  process.exitCode = 1;
+}
+
+/** What the API emits now and the committed files do not say. */
+function differences() {
   const folder = mkdtempSync(join(tmpdir(), 'metewand-schema-'));
   try {
     execFileSync(process.execPath, ['--enable-source-maps', 'graphql-api/dist/emit-schema.js', folder], {
       cwd: root,
       stdio: ['ignore', 'ignore', 'inherit'],
     });
-    return emitted.filter((file) => differs(file, readFileSync(join(folder, file), 'utf8')));
+    return emitted
+      .map((file) => ({
+        file,
+        path: join(root, 'schema', file),
+        fresh: readFileSync(join(folder, file), 'utf8'),
+      }))
+      .filter(({ path, fresh }) => !existsSync(path) || readFileSync(path, 'utf8') !== fresh);
   } finally {
     rmSync(folder, { recursive: true });
   }
