@@ -35,7 +35,10 @@ export async function welcome(address, inboxUrl) {
     `  ${organisation}`,
     ...demoSignIns
       .filter((signIn) => signIn.organisation === organisation)
-      .map(({ email, role, name: person }) => `    ${email.padEnd(width)}  ${person}, ${role}`),
+      .map(
+        ({ email, role, name: person }) =>
+          `    ${email.padEnd(width)}  ${person}, ${role.toLowerCase().replaceAll('_', ' ')}`,
+      ),
   ]);
   console.log(`
 Metewand runs at   ${address}
