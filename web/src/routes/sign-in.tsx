@@ -90,15 +90,15 @@ const Foot = styled.footer`
 `;
 
 const Right = styled.div`
+  position: relative;
   overflow: hidden;
   background: var(--mw-rod);
   svg {
-    display: block;
+    position: absolute;
     overflow: visible;
     width: 100%;
     min-width: 820px;
     height: 100%;
-    min-height: 720px;
   }
   @media (max-width: 1023px) {
     display: none;

@@ -89,3 +89,9 @@ test('says what happened when the server fails, with the number for support', as
   expect(screen.getByText(/req-1/)).toBeVisible();
   expect(screen.getByRole('button', { name: 'Try again' })).toBeVisible();
 });
+
+test('leaves out the pages a role may not see', async () => {
+  await renderRoute(limits, fakeLink({ Viewer: { viewer: aViewer({ roles: ['REQUESTER'] }) } }));
+  const nav = await screen.findByRole('navigation', { name: 'Main' });
+  expect(within(nav).queryByRole('link', { name: /Candidates|Frontier|Approval/ })).not.toBeInTheDocument();
+});

@@ -110,4 +110,7 @@ const Square = styled(PrimerButton)`
   flex: none;
   padding: 0;
   aspect-ratio: 1;
+  &&[data-variant='invisible'] {
+    color: var(--mw-ink);
+  }
 `;

@@ -46,6 +46,7 @@ export function OrganisationSwitch({ onSwitched }: { onSwitched: () => void }) {
         <Box {...props} aria-label={`Clinic group: ${organisation.name}`}>
           <Name name={organisation.name} sites={organisation.sites.length} demo={organisation.demo} />
           <Icon name="down" />
+          <Icon name="site" />
         </Box>
       )}
     />
@@ -64,6 +65,8 @@ function Name({ name, sites, demo }: { name: string; sites: number; demo: boolea
   );
 }
 
+const RAIL = '@media (min-width: 768px) and (max-width: 1279px)';
+
 const Box = styled.button`
   display: flex;
   align-items: center;
@@ -80,6 +83,26 @@ const Box = styled.button`
   &[type='button'] {
     cursor: pointer;
   }
+  svg:nth-of-type(2) {
+    display: none;
+  }
+  /* Where the navigation is a rail: the sign alone, and nothing for members of one group. */
+  ${RAIL} {
+    justify-content: center;
+    width: 36px;
+    height: 36px;
+    margin: 4px 3px 8px;
+    padding: 0;
+    &:not([type='button']) {
+      display: none;
+    }
+    svg:nth-of-type(1) {
+      display: none;
+    }
+    svg:nth-of-type(2) {
+      display: block;
+    }
+  }
   &[type='button']:hover {
     background: var(--mw-raised);
     border-color: var(--mw-ink-3);
@@ -88,6 +111,9 @@ const Box = styled.button`
 
 const Text = styled.span`
   min-width: 0;
+  ${RAIL} {
+    display: none;
+  }
   b {
     display: block;
     line-height: 1.25;

@@ -25,7 +25,7 @@ export function RodNavigation({ heading, items, organisation, viewer }: RodNavig
         <Mark />
         <span>Metewand</span>
       </Brand>
-      <Wide>{organisation}</Wide>
+      {organisation}
       <NavList heading={heading} items={items} />
       <Foot>{viewer}</Foot>
     </Nav>
@@ -103,12 +103,6 @@ const Brand = styled(Link)`
     span {
       display: none;
     }
-  }
-`;
-
-const Wide = styled.div`
-  ${RAIL} {
-    display: none;
   }
 `;
 

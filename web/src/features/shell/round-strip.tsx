@@ -41,6 +41,8 @@ const Strip = styled.section`
 `;
 
 const Name = styled.span`
+  flex: none;
+  max-width: 40%;
   overflow: hidden;
   text-overflow: ellipsis;
   white-space: nowrap;
