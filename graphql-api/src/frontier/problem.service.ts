@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { In, type EntityManager } from 'typeorm';
-import { parseProblem, ProblemError, type Problem } from '@metewand/frontier';
+import { parseProblem, ProblemError, type Problem, type WriteFigure } from '@metewand/frontier';
 import { LinksService } from '../candidates/links.service.js';
 import type { Candidate } from '../candidates/entities/candidate.entity.js';
 import { RoundCostsService, type PricedCandidate, type RoundCosts } from '../costing/round-costs.service.js';
@@ -14,6 +14,7 @@ import { BenefitsService, type Benefit } from '../scoring/benefits.service.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
 import { buildProblem, type BuiltProblem, type ProblemSource } from './build-problem.js';
 import type { CostAxis } from './cost-axis.enum.js';
+import { figuresInWords } from './figures-in-words.js';
 import { fingerprintOf } from './fingerprint.js';
 import type { LeftOut } from './left-out.js';
 import type { RunInput, RunItemRow, RunLeftOutRow } from './run-result.js';
@@ -25,6 +26,8 @@ export interface FrozenProblem {
   problem: Problem;
   input: RunInput;
   fingerprint: string;
+  /** Writes the problem's figures for people. */
+  write: WriteFigure;
   /** What the figures came from, for the papers. */
   costs: RoundCosts;
 }
@@ -52,6 +55,7 @@ export class ProblemService {
     return this.db.transaction(async (em) => {
       const costs = await this.costs.ofRound(round.id);
       const benefits = await this.benefits.ofRound(round.id);
+      const limits = await this.limits.ofRound(round.id);
       const built = checked({
         name: round.name,
         currency: costs.currency,
@@ -60,10 +64,16 @@ export class ProblemService {
         candidates: costs.priced.map((priced) => problemCandidate(priced, benefits)),
         withoutQuote: new Map(costs.unpriced.map(({ candidate }) => [candidate.id, candidate.code])),
         links: (await this.links.ofRound(round.id)).map(({ link, memberIds }) => ({ ...link, memberIds })),
-        limits: await this.limits.ofRound(round.id),
+        limits,
       });
       const input = inputOf(built, costs, round, await this.names(em, costs));
-      return { problem: built.problem, input, fingerprint: fingerprintOf(built.problem), costs };
+      return {
+        problem: built.problem,
+        input,
+        fingerprint: fingerprintOf(built.problem),
+        write: figuresInWords(limits, costs.currency),
+        costs,
+      };
     });
   }
 

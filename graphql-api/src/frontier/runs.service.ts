@@ -47,7 +47,7 @@ export class RunsService {
       if (underWay) return new SearchAlreadyRunning(underWay.number);
       const frozen = await this.freeze(round, costAxis);
       if (frozen instanceof NothingToSearch) return frozen;
-      const collisions = explainInfeasible(frozen.problem);
+      const collisions = explainInfeasible(frozen.problem, frozen.write);
       if (collisions.length > 0) return new LimitsCollide(collisions);
       return this.queue(em, round, costAxis, seed ?? DEFAULT_SEED, frozen);
     });

@@ -24,11 +24,9 @@ while (!step.done) {
   of = progress.of;
   if (performance.now() - reportedAt >= REPORT_MS) {
     reportedAt = performance.now();
-    const points = progress.points().map(([cost, benefit]) => ({ benefit, cost, picks: [] }));
-    say({
-      kind: 'progress',
-      progress: { evaluations: progress.evaluations, of, kept: progress.kept, points },
-    });
+    const points = progress.portfolios().map(pointRow);
+    const { evaluations: done, kept } = progress;
+    say({ kind: 'progress', progress: { evaluations: done, of, kept, points } });
   }
   const mayStop = progress.evaluations >= leastEvaluations && Atomics.load(stopAsked, 0) === 1;
   step = search.next(mayStop ? { stop: true } : undefined);
@@ -50,7 +48,8 @@ function resultRow(result: SearchResult): RunResultRow {
     lookedAt: [...result.lookedAt],
     onceKept: [...result.onceKept],
     counts: result.counts,
-    notes: [...result.notes],
+    // the second one speaks in minor units
+    notes: result.notes.slice(0, 1),
   };
 }
 
