@@ -5,7 +5,7 @@ import { IsString, MaxLength, MinLength } from 'class-validator';
 /** Text that may be empty. Blanks around it are dropped. */
 export function IsText(longest: number) {
   return applyDecorators(
-    Transform(({ value }) => (typeof value === 'string' ? value.trim() : value)),
+    Transform(({ value }: { value: unknown }) => (typeof value === 'string' ? value.trim() : value)),
     IsString(),
     MaxLength(longest, { message: ({ property }) => `${property} has at most ${longest} characters` }),
   );
