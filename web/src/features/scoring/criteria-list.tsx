@@ -1,0 +1,42 @@
+import styled from 'styled-components';
+import { formatPercent } from '../../lib/money';
+import { Section } from '../../ui/section';
+import type { SheetCriterion } from './sheet-parts';
+
+/** What is scored: each criterion with both anchors and its weight. */
+export function CriteriaList({ criteria }: { criteria: readonly SheetCriterion[] }) {
+  return (
+    <Section title="Criteria" aside="weights froze when scoring opened" padded>
+      <List>
+        {criteria.map(({ id, name, weight, lowAnchor, highAnchor }) => (
+          <li key={id}>
+            <b>{name}</b>
+            <span className="num">{formatPercent(Number(weight), 1)}</span>
+            <dl className="small muted">
+              <dt>100</dt>
+              <dd>{highAnchor}</dd>
+              <dt>0</dt>
+              <dd>{lowAnchor}</dd>
+            </dl>
+          </li>
+        ))}
+      </List>
+    </Section>
+  );
+}
+
+const List = styled.ul`
+  li {
+    display: grid;
+    grid-template-columns: minmax(0, 1fr) auto;
+    gap: 4px 16px;
+    padding: 10px 0;
+    border-top: 1px solid var(--mw-line);
+  }
+  dl {
+    grid-column: 1 / -1;
+    display: grid;
+    grid-template-columns: 32px minmax(0, 1fr);
+    gap: 2px;
+  }
+`;
