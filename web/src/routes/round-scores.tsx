@@ -56,7 +56,7 @@ export function loader({ params }: LoaderFunctionArgs) {
 }
 
 export function Component() {
-  const queryRef = useLoaderData<typeof loader>();
+  const queryRef = useLoaderData<Awaited<ReturnType<typeof loader>>>();
   const { scoreSheet: sheet } = useReadQuery(queryRef).data;
   const { membership } = useViewer();
   const assesses = useCan()('saveScore');

@@ -53,7 +53,7 @@ export function loader({ params }: LoaderFunctionArgs) {
 }
 
 export function Component() {
-  const queryRef = useLoaderData<typeof loader>();
+  const queryRef = useLoaderData<Awaited<ReturnType<typeof loader>>>();
   const { data } = useReadQuery(queryRef);
   const [params, setParams] = useSearchParams();
   const can = useCan();
