@@ -1,0 +1,53 @@
+import { gql } from '@apollo/client';
+import type { TypedDocumentNode } from '@apollo/client';
+import { useMutation } from '@apollo/client/react';
+import type { CreateCandidateInput, UpdateCandidateInput } from '../../generated/graphql';
+import { CANDIDATE_DETAILS } from './candidate-details';
+import type {
+  CreateCandidateMutation,
+  CreateCandidateMutationVariables,
+  UpdateCandidateMutation,
+  UpdateCandidateMutationVariables,
+} from './use-save-candidate.generated';
+
+const CREATE_CANDIDATE: TypedDocumentNode<CreateCandidateMutation, CreateCandidateMutationVariables> = gql`
+  mutation CreateCandidate($input: CreateCandidateInput!) {
+    createCandidate(input: $input) {
+      ...CandidateDetails
+      ... on MandatoryNeedsReason {
+        message
+      }
+    }
+  }
+  ${CANDIDATE_DETAILS}
+`;
+
+const UPDATE_CANDIDATE: TypedDocumentNode<UpdateCandidateMutation, UpdateCandidateMutationVariables> = gql`
+  mutation UpdateCandidate($input: UpdateCandidateInput!) {
+    updateCandidate(input: $input) {
+      ...CandidateDetails
+      ... on MandatoryNeedsReason {
+        message
+      }
+    }
+  }
+  ${CANDIDATE_DETAILS}
+`;
+
+type Saved = CreateCandidateMutation['createCandidate'];
+
+/** Adds and changes candidates. Gives the candidate, or why it needs a reason to be mandatory. */
+export function useSaveCandidate() {
+  const [createCandidate] = useMutation(CREATE_CANDIDATE, { refetchQueries: 'active' });
+  const [updateCandidate] = useMutation(UPDATE_CANDIDATE, { refetchQueries: 'active' });
+  return {
+    async create(input: CreateCandidateInput): Promise<Saved> {
+      return (await createCandidate({ variables: { input } })).data!.createCandidate;
+    },
+    async update(input: UpdateCandidateInput): Promise<Saved> {
+      return (await updateCandidate({ variables: { input } })).data!.updateCandidate;
+    },
+  };
+}
+
+export type { Saved };
