@@ -83,7 +83,7 @@ export function loader({ params, request }: LoaderFunctionArgs) {
 }
 
 export function Component() {
-  const queryRef = useLoaderData() as Awaited<ReturnType<typeof loader>>;
+  const queryRef = useLoaderData<Awaited<ReturnType<typeof loader>>>();
   const { round, candidates, viewer } = useReadQuery(queryRef).data;
   const { organisation } = viewer;
   const can = useCan();

@@ -63,7 +63,7 @@ export function loader({ params }: LoaderFunctionArgs) {
 }
 
 export function Component() {
-  const queryRef = useLoaderData() as Awaited<ReturnType<typeof loader>>;
+  const queryRef = useLoaderData<Awaited<ReturnType<typeof loader>>>();
   const { round, roundOverview, viewer } = useReadQuery(queryRef).data;
   const [, setOpen] = useOpenParam();
   const can = useCan();

@@ -70,7 +70,7 @@ export function loader({ params }: LoaderFunctionArgs) {
 }
 
 export function Component() {
-  const queryRef = useLoaderData() as Awaited<ReturnType<typeof loader>>;
+  const queryRef = useLoaderData<Awaited<ReturnType<typeof loader>>>();
   const { data } = useReadQuery(queryRef);
   const [open, setOpen] = useOpenParam();
   const { round, roundOverview: overview, auditFeed } = data;
