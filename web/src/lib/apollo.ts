@@ -16,6 +16,14 @@ import { possibleTypes } from '../generated/possible-types';
 import { OfflineError, errorCode } from './error-code';
 import { createSession } from './session';
 
+declare module '@apollo/client' {
+  interface DefaultContext {
+    headers?: Record<string, string>;
+    /** The token the request went out with. */
+    token?: string;
+  }
+}
+
 const REFRESH_SESSION: TypedDocumentNode<RefreshSessionMutation, RefreshSessionMutationVariables> = gql`
   mutation RefreshSession {
     refreshSession {

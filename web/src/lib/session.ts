@@ -60,5 +60,5 @@ export function createSession(requestToken: () => Promise<string>): Session {
 // Each renewal turns the cookie over, so two tabs renewing at once would make one of them present a used cookie.
 function oneTabAtATime(work: () => Promise<string>): Promise<string> {
   if (!navigator.locks) return work();
-  return navigator.locks.request('metewand.session', work) as Promise<string>;
+  return navigator.locks.request<Promise<string>>('metewand.session', work);
 }

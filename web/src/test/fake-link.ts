@@ -14,11 +14,11 @@ export function fakeLink(answers: Answers): FakeLink {
   const asked: FakeLink['asked'] = [];
   const link = new ApolloLink((operation) => {
     const name = operation.operationName ?? '';
-    const authorization: string | undefined = operation.getContext().headers?.authorization;
+    const { token } = operation.getContext();
     asked.push({
       operation: name,
       variables: operation.variables,
-      token: authorization?.replace('Bearer ', ''),
+      token,
     });
     return new Observable((observer) => {
       queueMicrotask(() => {

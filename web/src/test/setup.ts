@@ -27,7 +27,7 @@ class NoObserver {
 }
 globalThis.ResizeObserver ??= NoObserver as unknown as typeof ResizeObserver;
 globalThis.IntersectionObserver ??= NoObserver as unknown as typeof IntersectionObserver;
-Element.prototype.scrollIntoView ??= () => undefined;
+Element.prototype.scrollIntoView = () => undefined;
 window.scrollTo = () => undefined;
 document.adoptedStyleSheets ??= [];
 (globalThis as { CSS?: unknown }).CSS ??= { supports: () => false, escape: (text: string) => text };

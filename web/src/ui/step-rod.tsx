@@ -36,7 +36,7 @@ export function StepRod({
             <Piece
               $size={size}
               $state={state}
-              style={{ '--step-progress': `${progress * 100}%` } as object}
+              style={{ '--step-progress': `${progress * 100}%` }}
               aria-hidden
             />
             <span>{step.name}</span>

@@ -74,7 +74,7 @@ function WideTable<Row>({
 }: TableProps<Row>) {
   return (
     <Scroll>
-      <Grid style={{ '--row-height': `${rowHeight}px` } as object}>
+      <Grid style={{ '--row-height': `${rowHeight}px` }}>
         <caption className="visually-hidden">{caption}</caption>
         <thead>
           <tr>

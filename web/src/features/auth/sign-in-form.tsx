@@ -21,7 +21,7 @@ export function SignInForm({ onSignedIn }: { onSignedIn: () => void }) {
   async function submit(event: FormEvent<HTMLFormElement>) {
     event.preventDefault();
     const form = new FormData(event.currentTarget);
-    const typed = { email: String(form.get('email')).trim(), password: String(form.get('password')) };
+    const typed = { email: text(form, 'email').trim(), password: text(form, 'password') };
     const missing = check(typed);
     setProblems(missing);
     if (missing.email) return email.current?.focus();
@@ -61,6 +61,11 @@ export function SignInForm({ onSignedIn }: { onSignedIn: () => void }) {
       </Button>
     </Form>
   );
+}
+
+function text(form: FormData, name: string): string {
+  const value = form.get(name);
+  return typeof value === 'string' ? value : '';
 }
 
 function check({ email, password }: { email: string; password: string }): Problems {
