@@ -3,7 +3,7 @@ import { dirname, join } from 'node:path';
 import { root, tool } from './root.mjs';
 
 /** A suite that has not ended by then hangs; it is ended, so that the others run and there is a last line. */
-const limitMs = 10 * 60 * 1000;
+const limitMs = 15 * 60 * 1000;
 
 /** The API and the kernels: jest, with a database and both fakes in its environment. */
 export function runJest(processes, environment, args) {
