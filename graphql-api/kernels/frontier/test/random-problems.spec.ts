@@ -9,7 +9,7 @@ const seeds = (count: number): number[] => Array.from({ length: count }, (_, ind
 describe('problems drawn at random, every kind of limit and link at once', () => {
   it('has the exact front of each small one', () => {
     let feasible = 0;
-    for (const seed of seeds(120)) {
+    for (const seed of seeds(60)) {
       const problem = parseProblem(aRandomProblem(seed, 4 + (seed % 6)));
       const exact = bruteForceFront(problem);
       const result = runToEnd(problem, { seed });
@@ -18,14 +18,14 @@ describe('problems drawn at random, every kind of limit and link at once', () =>
       if (exact.length > 0) feasible++;
       else expect(result.notes.length).toBeGreaterThan(0);
     }
-    expect(feasible).toBeGreaterThan(60);
+    expect(feasible).toBeGreaterThan(30);
   });
 
   it('gives only feasible portfolios, with their true sums, of which none beats another', () => {
     let points = 0;
-    for (const seed of seeds(30)) {
+    for (const seed of seeds(15)) {
       const problem = parseProblem(aRandomProblem(seed, 40));
-      const result = runToEnd(problem, { seed, evaluations: 200_000 });
+      const result = runToEnd(problem, { seed, evaluations: 100_000 });
       for (const [place, { picks, benefit, cost }] of result.points.entries()) {
         expect(violationsOf(problem, picks)).toEqual([]);
         expect(totalsOf(problem, picks)).toMatchObject({ benefit, cost });
@@ -35,6 +35,6 @@ describe('problems drawn at random, every kind of limit and link at once', () =>
       }
       points += result.points.length;
     }
-    expect(points).toBeGreaterThan(500);
+    expect(points).toBeGreaterThan(250);
   });
 });
