@@ -35,7 +35,7 @@ export class BenefitsService {
   ofRound(roundId: string): Promise<Map<string, Benefit>> {
     return this.db.transaction(async (em) => {
       const criteria = await this.criteria.ofRound(roundId);
-      if (criteria.every(({ swingWeight }) => swingWeight === 0)) return new Map();
+      if (criteria.every(({ swingWeight }) => swingWeight === 0)) return new Map<string, Benefit>();
       const assessorIds = (await this.memberships.withRole(Role.CLINICAL_ASSESSOR)).map(({ id }) => id);
       const candidates = await em.find(Candidate, { where: { roundId }, select: { id: true } });
       const ids = candidates.map(({ id }) => id);

@@ -26,7 +26,7 @@ export class KnownBenefits extends CandidateBenefits {
   byCandidate(roundId: string): Promise<Map<string, number>> {
     return this.db.transaction(async () => {
       const { stage } = await this.rounds.find(roundId);
-      if (!isScoringClosed(stage)) return new Map();
+      if (!isScoringClosed(stage)) return new Map<string, number>();
       const benefits = await this.benefits.ofRound(roundId);
       return new Map([...benefits].map(([id, { tenThousandths }]) => [id, tenThousandths / 10_000]));
     });
