@@ -1,15 +1,15 @@
 import { explainInfeasible, parseProblem } from '@metewand/frontier';
-import { LinkKind } from '../candidates/entities/link.entity';
-import { LimitMeasure } from '../limits/entities/limit.entity';
+import { LinkKind } from '../candidates/entities/link.entity.js';
+import { LimitMeasure } from '../limits/entities/limit.entity.js';
 import {
   buildProblem,
   type NamedLimit,
   type ProblemCandidate,
   type ProblemLink,
   type ProblemSource,
-} from './build-problem';
-import { CostAxis } from './cost-axis.enum';
-import { figuresInWords } from './figures-in-words';
+} from './build-problem.js';
+import { CostAxis } from './cost-axis.enum.js';
+import { figuresInWords } from './figures-in-words.js';
 
 const aCandidate = (code: string, facts: Partial<ProblemCandidate> = {}): ProblemCandidate => ({
   id: `id of ${code}`,

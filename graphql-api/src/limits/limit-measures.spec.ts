@@ -1,5 +1,5 @@
-import { LimitMeasure } from './entities/limit.entity';
-import { boundOf, formatUse, useOf, type MeasuredCandidate } from './limit-measures';
+import { LimitMeasure } from './entities/limit.entity.js';
+import { boundOf, formatUse, useOf, type MeasuredCandidate } from './limit-measures.js';
 
 const { ADDED_RUNNING_COST, INSTALLATION_DAYS, FLOOR_AREA, CANDIDATES } = LimitMeasure;
 

@@ -1,5 +1,5 @@
 import type { Problem } from '@metewand/frontier';
-import { reasonOut } from './memo-left-out';
+import { reasonOut } from './memo-left-out.js';
 
 const items = [
   { id: 'cheap', benefit: 100, cost: 10, uses: [1] },

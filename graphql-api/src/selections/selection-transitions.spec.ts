@@ -1,5 +1,5 @@
-import { RoundStage } from '../rounds/round-stages';
-import { Decision, SelectionState, transitionOf } from './selection-transitions';
+import { RoundStage } from '../rounds/round-stages.js';
+import { Decision, SelectionState, transitionOf } from './selection-transitions.js';
 
 describe('a submitted portfolio', () => {
   it.each([
