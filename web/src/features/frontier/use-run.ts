@@ -1,0 +1,68 @@
+import { gql } from '@apollo/client';
+import type { TypedDocumentNode } from '@apollo/client';
+import { useApolloClient, useQuery, useSuspenseQuery } from '@apollo/client/react';
+import { useEffect, useRef } from 'react';
+import { client } from '../../lib/apollo';
+import { RUN_FIELDS, RUN_PROGRESS_FIELDS } from './run-fields';
+import type { RunFieldsFragment } from './run-fields.generated';
+import { isActive } from './run-state';
+import type {
+  RunProgressQuery,
+  RunProgressQueryVariables,
+  RunQuery,
+  RunQueryVariables,
+} from './use-run.generated';
+
+const POLL_MS = 1_000;
+
+export const RUN: TypedDocumentNode<RunQuery, RunQueryVariables> = gql`
+  query Run($id: ID!) {
+    run(id: $id) {
+      ...RunFields
+    }
+  }
+  ${RUN_FIELDS}
+`;
+
+const RUN_PROGRESS: TypedDocumentNode<RunProgressQuery, RunProgressQueryVariables> = gql`
+  query RunProgress($id: ID!) {
+    run(id: $id) {
+      ...RunProgressFields
+    }
+  }
+  ${RUN_PROGRESS_FIELDS}
+`;
+
+export type Run = RunFieldsFragment;
+
+/** For the loader. A run that has ended never changes, so what the cache holds of it is still true. */
+export async function loadRun(id: string): Promise<void> {
+  const cached = client.readQuery({ query: RUN, variables: { id } });
+  if (cached && !isActive(cached.run.state)) return;
+  await client.query({ query: RUN, variables: { id }, fetchPolicy: 'network-only' });
+}
+
+/** The run, asked about each second until it ends. `error` tells that the last question got no answer. */
+export function useRun(id: string): { run: Run; error: unknown } {
+  const { run } = useSuspenseQuery(RUN, { variables: { id } }).data;
+  const active = isActive(run.state);
+  const { error } = useQuery(RUN_PROGRESS, {
+    variables: { id },
+    pollInterval: POLL_MS,
+    skip: !active,
+    skipPollAttempt: () => document.hidden,
+  });
+  useWholeResultAtTheEnd(id, active);
+  return { run, error: active ? error : undefined };
+}
+
+/** The points that were looked at come only with the result, and are too many to ask for each second. */
+function useWholeResultAtTheEnd(id: string, active: boolean) {
+  const apollo = useApolloClient();
+  const wasActive = useRef(active);
+  useEffect(() => {
+    const ended = wasActive.current && !active;
+    wasActive.current = active;
+    if (ended) void apollo.query({ query: RUN, variables: { id }, fetchPolicy: 'network-only' });
+  }, [apollo, id, active]);
+}
