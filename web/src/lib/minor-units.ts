@@ -1,0 +1,20 @@
+import { minorDigits } from './money';
+import type { Amount } from './money';
+
+/** Whole minor units, so that sums and differences stay exact: "128.20" EUR → 12820. */
+export function toMinor({ amount, currency }: Amount): number {
+  return Math.round(Number(amount) * 10 ** minorDigits(currency));
+}
+
+export function fromMinor(minor: number, currency: string): Amount {
+  const digits = minorDigits(currency);
+  return { amount: (minor / 10 ** digits).toFixed(digits), currency };
+}
+
+/** All of one currency. */
+export function sumOf(currency: string, amounts: readonly Amount[]): Amount {
+  return fromMinor(
+    amounts.reduce((sum, amount) => sum + toMinor(amount), 0),
+    currency,
+  );
+}
