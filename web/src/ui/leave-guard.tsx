@@ -1,0 +1,37 @@
+import { useCallback, useEffect } from 'react';
+import type { ReactNode } from 'react';
+import { useBlocker } from 'react-router-dom';
+import type { BlockerFunction } from 'react-router-dom';
+import { ConfirmDialog } from './dialog';
+
+interface LeaveGuardProps {
+  /** Whether something would be lost. */
+  when: boolean;
+  title: string;
+  /** What would be lost. */
+  children: ReactNode;
+  /** The button that goes on all the same. */
+  leave: string;
+  /** Which moves to ask about; any unless told. */
+  blocks?: BlockerFunction;
+}
+
+/** Asks before the address changes or the window closes while something would be lost. */
+export function LeaveGuard({ when, title, children, leave, blocks = anyMove }: LeaveGuardProps) {
+  const blocker = useBlocker(useCallback<BlockerFunction>((move) => when && blocks(move), [when, blocks]));
+  useEffect(() => {
+    if (!when) return;
+    const warn = (event: BeforeUnloadEvent) => event.preventDefault();
+    window.addEventListener('beforeunload', warn);
+    return () => window.removeEventListener('beforeunload', warn);
+  }, [when]);
+  if (blocker.state !== 'blocked') return null;
+  return (
+    <ConfirmDialog title={title} confirm={leave} danger onConfirm={blocker.proceed} onClose={blocker.reset}>
+      {children}
+    </ConfirmDialog>
+  );
+}
+
+const anyMove: BlockerFunction = ({ currentLocation, nextLocation }) =>
+  currentLocation.pathname !== nextLocation.pathname;
