@@ -17,8 +17,7 @@ export function setUpApp(app: NestExpressApplication): void {
   app.use(requestContext);
   app.useGlobalPipes(inputValidation());
   if (env.webDist) {
-    app.use(webFiles(env.webDist));
-    app.use(/^\/(?!graphql|live|ready)/, webPage(env.webDist));
+    app.use(webFiles(env.webDist), webPage(env.webDist));
   }
   app.enableShutdownHooks();
 }

@@ -32,7 +32,7 @@ describe.each([
     const { page } = person;
     await page.goto(`${productUrl}/sign-in`);
     await page.getByRole('button', { name: 'Sign in' }).waitFor();
-    const problems = [['Sign in', await accessibilityProblems(page)]];
+    const problems: [screen: string, found: string[]][] = [['Sign in', await accessibilityProblems(page)]];
     await picture(page, `screen-sign-in-${look}`);
     await signIn(page, COORDINATOR);
     for (const screen of SCREENS) {

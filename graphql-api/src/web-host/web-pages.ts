@@ -15,10 +15,13 @@ function cacheHashedFiles(response: Response, path: string) {
   );
 }
 
+const NOT_PAGES = /^\/(graphql|live|ready)(\/|$)/;
+
 export function webPage(webDist: string) {
   const file = join(webDist, 'index.html');
   return (request: Request, response: Response, next: NextFunction) => {
-    if (request.method !== 'GET' || !request.accepts('html') || !existsSync(file)) return next();
+    const isPage = request.method === 'GET' && request.accepts('html') && !NOT_PAGES.test(request.path);
+    if (!isPage || !existsSync(file)) return next();
     const page = readFileSync(file, 'utf8').replaceAll('__NONCE__', response.locals.nonce as string);
     response.setHeader('cache-control', 'no-store');
     response.type('html').send(page);
