@@ -1,5 +1,6 @@
 import type { RoundStage } from '../../generated/graphql';
 import { formatDate, timeLeft } from '../../lib/dates';
+import { formatNumber } from '../../lib/money';
 
 interface ScoresFacts {
   round: { stage: RoundStage; scoringClosesOn: string };
@@ -26,7 +27,7 @@ export function scoresAnswer({ round, assesses, given, of, assessors }: ScoresFa
   }
   if (round.stage !== 'SCORE') {
     return {
-      title: `Scored by ${assessors.length} assessors, ${all} of ${wanted} scores given`,
+      title: `Scored by ${assessors.length} assessors, ${formatNumber(all)} of ${formatNumber(wanted)} scores given`,
       sub: 'Scoring is closed. A missing score is left out of the mean of its criterion.',
     };
   }
@@ -37,7 +38,7 @@ export function scoresAnswer({ round, assesses, given, of, assessors }: ScoresFa
     };
   }
   return {
-    title: `${all} of ${wanted} scores are given`,
+    title: `${formatNumber(all)} of ${formatNumber(wanted)} scores are given`,
     sub: `Who scored what stays closed until scoring does. ${closes}`,
   };
 }
