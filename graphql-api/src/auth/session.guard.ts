@@ -25,7 +25,9 @@ export class SessionGuard extends AuthGuard('jwt') {
     return GqlExecutionContext.create(context).getContext<GraphqlContext>().req;
   }
 
-  override handleRequest<T>(_error: unknown, caller: Caller | false): T {
+  /** A token that does not hold comes without an error; an error means that we could not find out. */
+  override handleRequest<T>(error: Error | null, caller: Caller | false): T {
+    if (error) throw error;
     if (!caller) throw new UnauthenticatedError();
     requestScope().caller = caller;
     return caller as T;
