@@ -8,6 +8,9 @@ export function pageNonce(_request: Request, response: Response, next: NextFunct
   next();
 }
 
+// The live region of the component library hides itself by this one style, which cannot carry a nonce.
+const LIVE_REGION_STYLE = "'sha256-DTxLo/p0U68OvQ0C/ZBm32x0lyr7xl7Dd6LHwBsg7sc='";
+
 /** `storageOrigin`: where the browser posts uploads to and fetches documents from. */
 export function securityHeaders(storageOrigin: string, production: boolean) {
   const nonce = (_request: unknown, response: { locals?: { nonce?: string } }) =>
@@ -20,7 +23,7 @@ export function securityHeaders(storageOrigin: string, production: boolean) {
       directives: {
         defaultSrc: ["'none'"],
         scriptSrc: ["'self'", nonce as never],
-        styleSrc: ["'self'", nonce as never],
+        styleSrc: ["'self'", nonce as never, LIVE_REGION_STYLE],
         // the chart library sets style attributes
         styleSrcAttr: ["'unsafe-inline'"],
         imgSrc: ["'self'", 'data:', 'blob:'],
