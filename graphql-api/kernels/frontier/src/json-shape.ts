@@ -62,7 +62,7 @@ export function text(value: unknown, path: string, { least = 0, most = Infinity 
           ? `a text of at most ${most} characters`
           : 'a text';
   if (typeof value !== 'string' || value.length < least || value.length > most) refuse(path, expected, value);
-  return value as string;
+  return value;
 }
 
 export function wholeNumber(value: unknown, path: string, { least, most }: Range = {}): number {
@@ -73,7 +73,7 @@ export function wholeNumber(value: unknown, path: string, { least, most }: Range
         ? `a whole number of at least ${least}`
         : 'a whole number';
   if (typeof value !== 'number' || !Number.isInteger(value)) refuse(path, expected, value);
-  const number = value as number;
+  const number = value;
   if (!Number.isSafeInteger(number)) refuse(path, 'a whole number below 2^53', value);
   if (number < (least ?? -Infinity) || number > (most ?? Infinity)) refuse(path, expected, value);
   return number;

@@ -1,14 +1,6 @@
-import { countName, needName, type Violation } from './feasible.js';
-import type { Model, OptionList } from './model.js';
+import { countName, needName } from './feasible.js';
+import type { Model, OptionList, Row } from './model.js';
 import type { Item, Problem } from './problem.js';
-
-/** Where a row comes from. A "least" rule is kept as the negated row, its bound negated too. */
-export interface Row {
-  readonly kind: Violation['kind'];
-  readonly name: string;
-  /** 1, or -1 where the row is negated. */
-  readonly sign: 1 | -1;
-}
 
 type CompiledRows = Pick<Model, 'rows' | 'rowMost' | 'rowWeight' | 'termStart' | 'termRow' | 'termValue'>;
 

@@ -1,7 +1,8 @@
 import { explainInfeasible } from './explain-infeasible.js';
 import type { Picks } from './feasible.js';
 import { LocalSearch } from './local-search.js';
-import { compile, type Model } from './model.js';
+import { compileModel } from './compile-model.js';
+import type { Model } from './model.js';
 import type { ParetoFront } from './pareto-front.js';
 import { ProblemError } from './problem-error.js';
 import type { Problem } from './problem.js';
@@ -72,7 +73,7 @@ export function* searchFrontier(
   refuseSecondCost(problem);
   const { seed = 1, evaluations = 20_000_000, reportEvery = 250_000, lookedAtSample = 20_000 } = settings;
   const reasons = explainInfeasible(problem);
-  const model = compile(problem);
+  const model = compileModel(problem);
   if (reasons.length > 0 || model === undefined) return infeasible(seed, reasons);
 
   const search = new LocalSearch(model, seed, lookedAtSample);

@@ -106,8 +106,8 @@ describe('a problem that no portfolio can meet', () => {
 
   it('is explained in the units of the host', () => {
     const problem = aProblem(['bed', 'lamp'], { ceiling: 15, mustInclude: ['bed', 'lamp'] });
-    expect(explainInfeasible(problem, (figure, of) => `${figure / 100} of ${String(of)}`)).toEqual([
-      'What must be taken (bed, lamp) brings cost to 0.2 of cost at least, 0.05 of cost over the ceiling of 0.15 of cost.',
+    expect(explainInfeasible(problem, (figure, of) => `${figure / 100} of ${JSON.stringify(of)}`)).toEqual([
+      'What must be taken (bed, lamp) brings cost to 0.2 of "cost" at least, 0.05 of "cost" over the ceiling of 0.15 of "cost".',
     ]);
   });
 
