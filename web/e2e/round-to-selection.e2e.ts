@@ -27,13 +27,9 @@ describe('a round, from a quote to an approved portfolio', () => {
   it('lets the coordinator upload a quote, enter its figures, see what it costs over its life, and keep it', () =>
     as(COORDINATOR, async (page) => {
       await open(page, 'Candidates');
-      await page.getByRole('searchbox').or(page.getByPlaceholder('Find')).first().fill('contrast injector');
-      await page
-        .getByRole('row', { name: /Dual-head contrast injector/u })
-        .getByRole('link')
-        .or(page.getByRole('row', { name: /Dual-head contrast injector/u }).getByRole('button'))
-        .first()
-        .click();
+      await page.getByLabel('Find a need').fill('contrast injector');
+      await page.getByText('1–1 of 1').waitFor();
+      await page.getByRole('link', { name: 'Dual-head contrast injector for CT' }).click();
       await page.getByRole('link', { name: 'Compare the quotes' }).click();
       await page.getByRole('heading', { level: 1, name: /contrast injector/iu }).waitFor();
 
@@ -47,19 +43,20 @@ describe('a round, from a quote to an approved portfolio', () => {
       await page.getByRole('button', { name: /Enter its figures/u }).click();
 
       const form = page.getByRole('dialog');
-      await form.getByLabel('Vendor').fill('Hollowmere Devices (demo)');
+      await form.getByLabel('Vendor', { exact: true }).fill('Hollowmere Devices (demo)');
       await form.getByLabel('Quote number').fill('Q-77');
-      await form.getByLabel('Quote date').fill('2026-11-20');
+      await form.getByLabel('Date of the quote').fill('2026-11-20');
       await form.getByLabel('Valid until').fill('2027-05-31');
       await form.getByLabel('Price of one piece').fill('21 500,00');
       await form.getByLabel('Warranty').fill('2');
-      await form.getByLabel('Service a year').fill('1 200');
+      await form.getByLabel('Service per year').fill('1 200');
       await form.getByLabel('Delivery time').fill('8');
-      await form.getByRole('button', { name: /Save/u }).click();
+      await form.getByRole('button', { name: 'Save the quote' }).click();
       await form.waitFor({ state: 'hidden' });
-
-      await page.getByText('Hollowmere Devices (demo)').first().waitFor();
-      await page.getByRole('rowheader', { name: 'Life-cycle cost' }).first().waitFor();
+      await page
+        .getByText(/Q-77 saved\. Life-cycle cost €[\d\s.]+/u)
+        .first()
+        .waitFor();
       await picture(page, 'journey-2-compared');
 
       await page.getByRole('button', { name: 'Choose another' }).click();
