@@ -60,7 +60,7 @@ export function Component() {
   const { scoreSheet: sheet } = useReadQuery(queryRef).data;
   const { membership } = useViewer();
   const assesses = useCan()('saveScore');
-  const scores = useOwnScores(sheet.own);
+  const scores = useOwnScores(sheet.round.id, sheet.own);
   const { round, candidates, criteria, own, others, assessors } = sheet;
   const closed = stepIndex(round.stage) > stepIndex('SCORE');
   const scoring = round.stage === 'SCORE' && assesses && candidates.length > 0 && criteria.length > 0;

@@ -90,10 +90,7 @@ export function Component() {
               Print the memo
             </Button>
           </Tools>
-          <Signatures
-            selection={selection}
-            awaited={can('decideSelection') ? membership.name : 'Finance director'}
-          />
+          <Signatures selection={selection} awaited={can('decideSelection') ? membership.name : undefined} />
           <Decide>
             <DecisionBox key={selection.id} selection={selection} />
           </Decide>

@@ -165,6 +165,7 @@ export const Grid = styled.table`
     font-weight: 600;
   }
   tbody th small {
+    white-space: nowrap;
     font-weight: 400;
     color: var(--mw-ink-3);
   }

@@ -23,22 +23,29 @@ export interface OwnScores {
 }
 
 /** The viewer's scores: those that the page brought, overlaid by what was given since. */
-export function useOwnScores(loaded: readonly SheetScore[]): OwnScores {
-  const send = useSaveScore();
+export function useOwnScores(roundId: string, loaded: readonly SheetScore[]): OwnScores {
+  const send = useSaveScore(roundId);
   const [given, setGiven] = useState<ReadonlyMap<string, OwnScore & { input: ScoreToSave }>>(new Map());
   const [savedAt, setSavedAt] = useState<Date>();
   const [failure, setFailure] = useState<string>();
 
+  function at(candidateId: string, criterionId: string): OwnScore | undefined {
+    const key = keyOf(candidateId, criterionId);
+    const found = loaded.find((score) => keyOf(score.candidateId, score.criterionId) === key);
+    return given.get(key) ?? (found && { ...found, points: found.points ?? null, state: 'saved' });
+  }
+
   async function save(input: ScoreToSave) {
     const key = keyOf(input.candidateId, input.criterionId);
     const { points, cannotJudge, reason } = input;
+    const wasMissing = at(input.candidateId, input.criterionId) === undefined;
     const put = (state: OwnScore['state']) =>
       setGiven((before) =>
         new Map(before).set(key, { points: points ?? null, cannotJudge, reason, state, input }),
       );
     put('saving');
     try {
-      await send(input);
+      await send(input, { wasMissing });
       put('saved');
       setSavedAt(new Date());
       setFailure(undefined);
@@ -49,11 +56,7 @@ export function useOwnScores(loaded: readonly SheetScore[]): OwnScores {
   }
 
   return {
-    at: (candidateId, criterionId) => {
-      const key = keyOf(candidateId, criterionId);
-      const found = loaded.find((score) => keyOf(score.candidateId, score.criterionId) === key);
-      return given.get(key) ?? (found && { ...found, points: found.points ?? null, state: 'saved' });
-    },
+    at,
     save,
     retry: () =>
       [...given.values()].filter(({ state }) => state === 'failed').forEach(({ input }) => void save(input)),

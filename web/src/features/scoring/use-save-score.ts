@@ -1,7 +1,8 @@
 import { gql } from '@apollo/client';
-import type { TypedDocumentNode } from '@apollo/client';
+import type { ApolloCache, TypedDocumentNode } from '@apollo/client';
 import { useMutation } from '@apollo/client/react';
 import type { SaveScoreMutation, SaveScoreMutationVariables } from './use-save-score.generated';
+import type { RoundCounts } from '../../generated/graphql';
 import { SHEET_SCORE } from './sheet-parts';
 
 const SAVE_SCORE: TypedDocumentNode<SaveScoreMutation, SaveScoreMutationVariables> = gql`
@@ -15,10 +16,21 @@ const SAVE_SCORE: TypedDocumentNode<SaveScoreMutation, SaveScoreMutationVariable
 
 export type ScoreToSave = SaveScoreMutationVariables['input'];
 
-export function useSaveScore() {
+/** `wasMissing`: the round then counts one missing score less, without asking for the counts again. */
+export function useSaveScore(roundId: string) {
   const [saveScore] = useMutation(SAVE_SCORE);
-  return async (input: ScoreToSave) => {
-    const { data } = await saveScore({ variables: { input } });
-    return data!.saveScore;
-  };
+  return (input: ScoreToSave, { wasMissing }: { wasMissing: boolean }) =>
+    saveScore({ variables: { input }, update: (cache) => void (wasMissing && countOneLess(cache, roundId)) });
+}
+
+function countOneLess(cache: ApolloCache, roundId: string) {
+  cache.modify<{ counts: RoundCounts }>({
+    id: cache.identify({ __typename: 'Round', id: roundId }),
+    fields: {
+      counts: (counts) => {
+        const { scoresMissing } = counts as RoundCounts;
+        return { ...(counts as RoundCounts), scoresMissing: Math.max(0, scoresMissing - 1) };
+      },
+    },
+  });
 }

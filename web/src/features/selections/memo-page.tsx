@@ -28,10 +28,10 @@ export function MemoPage({ selection, decisionDate, candidates }: MemoPageProps)
     <Paper>
       <Mark size={34} />
       <p className="muted small">
-        {`Memo ${memoCode(decisionDate, selection.number)} · prepared by ${submittedBy.name}, ${formatInstant(submittedAt)} `}
+        {`${memo.roundName} · memo ${memoCode(decisionDate, selection.number)} · prepared by ${submittedBy.name}, ${formatInstant(submittedAt)} `}
         <Tag tone={STATE_TONES[state]}>{DECISION_WORDS[state]}</Tag>
       </p>
-      <h1>{`Purchase of equipment, ${memo.roundName.toLowerCase()}`}</h1>
+      <h1>Purchase of equipment</h1>
       {comment && (
         <Notice
           tone={state === 'DECLINED' ? 'bad' : 'info'}

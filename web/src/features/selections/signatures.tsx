@@ -7,8 +7,8 @@ import type { SelectionMemoFragment } from './selection-memo.generated';
 
 interface SignaturesProps {
   selection: Pick<SelectionMemoFragment, 'state' | 'submittedBy' | 'submittedAt' | 'decidedBy' | 'decidedAt'>;
-  /** Whose signature is awaited: the finance directors by name. */
-  awaited: string;
+  /** Whose signature is awaited, where it is the reader's own. */
+  awaited: string | undefined;
 }
 
 /** Who prepared it and who decided, four eyes one below the other. */
@@ -32,8 +32,8 @@ export function Signatures({ selection, awaited }: SignaturesProps) {
             {state === 'SUBMITTED' ? '2' : <Icon name={state === 'APPROVED' ? 'ok' : 'back'} />}
           </Mark>
           <Who>
-            <b>{decidedBy?.name ?? awaited}</b>
-            <small>Finance director</small>
+            <b>{decidedBy?.name ?? awaited ?? 'A finance director'}</b>
+            <small>{decidedBy || awaited ? 'Finance director' : 'Decides; never the preparer'}</small>
           </Who>
           <When>{decidedAt ? `${DECISION_WORDS[state]} ${formatInstant(decidedAt)}` : 'Not yet signed'}</When>
         </li>
