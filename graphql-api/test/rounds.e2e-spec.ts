@@ -106,7 +106,7 @@ describe('the stage', () => {
     const { stepBackRound } = await coordinator.get(STEP_BACK, { input: back });
     expect(stepBackRound.stage).toBe('GATHER');
     expect((await trail()).auditFeed.items[0]).toEqual({
-      sentence: 'Round moved from SCORE to GATHER',
+      sentence: 'Round moved from Score to Gather',
       detail: 'Two quotes came late',
       by: { name: 'Hanne Vos' },
     });

@@ -3,7 +3,7 @@ const SENTENCES = {
   'demo.loaded': () => 'Demo data loaded',
   'session.opened': () => 'Signed in',
   'round.ceiling': (d) => `Budget ceiling set to ${d.after}, was ${d.before}`,
-  'round.stage': (d) => `Round moved from ${d.before} to ${d.after}`,
+  'round.stage': (d) => `Round moved from ${stageName(d.before)} to ${stageName(d.after)}`,
   'candidate.created': () => 'Candidate added',
   'candidate.changed': () => 'Candidate changed',
   'quote.created': (d) => `Quote ${d.number} of ${d.vendor} entered`,
@@ -24,6 +24,11 @@ const SENTENCES = {
   'selection.returned': (d) => `Memo ${d.memo} returned`,
   'selection.declined': (d) => `Memo ${d.memo} declined`,
 } satisfies Record<string, (data: Record<string, string>) => string>;
+
+/** "SEARCH" reads "Search". */
+function stageName(stage: string): string {
+  return stage.charAt(0) + stage.slice(1).toLowerCase();
+}
 
 export type AuditAction = keyof typeof SENTENCES;
 

@@ -106,7 +106,7 @@ export class RunsService {
       }),
     );
     await this.jobs.enqueue(em, 'frontier.search', { runId: id });
-    const data = { number, detail: fingerprint };
+    const data = { number, fingerprint };
     await this.audit.record(em, 'run.started', { roundId: round.id, objectId: id, data });
     return em.findOneByOrFail(Run, { id });
   }
