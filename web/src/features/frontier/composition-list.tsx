@@ -25,7 +25,7 @@ export function CompositionList({ front, selected }: { front: Front; selected: P
   return (
     <>
       {items.length > SEARCH_FROM && (
-        <Search>
+        <Search data-screen-only>
           <TextField
             label="Find a candidate"
             icon="search"

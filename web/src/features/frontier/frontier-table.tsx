@@ -6,6 +6,7 @@ import { Button } from '../../ui/button';
 import { Pager } from '../../ui/pager';
 import { Table } from '../../ui/table';
 import type { Column } from '../../ui/table';
+import { useNarrow } from '../../ui/use-media';
 import { readPage } from '../../ui/use-table-params';
 import { downloadText } from './download-text';
 import type { Front } from './front';
@@ -30,7 +31,8 @@ export function FrontierTable({ front, chosen, fileName }: FrontierTableProps) {
   const pages = Math.ceil(portfolios.length / TABLE_PAGE_SIZE);
   const page = Math.min(readPage(params), pages);
   const rows = portfolios.slice((page - 1) * TABLE_PAGE_SIZE, page * TABLE_PAGE_SIZE);
-  const columns = useMemo(() => columnsOf(front, chosen), [front, chosen]);
+  const narrow = useNarrow();
+  const columns = useMemo(() => columnsOf(front, chosen, narrow), [front, chosen, narrow]);
   const csv = () =>
     frontierCsv(portfolios, { currency: ceiling.currency, codes: items.map(({ code }) => code) });
   return (
@@ -55,12 +57,14 @@ export function FrontierTable({ front, chosen, fileName }: FrontierTableProps) {
   );
 }
 
-function columnsOf(front: Front, chosen: Chosen): Column<Portfolio>[] {
+/** In two-line rows no header stands above a figure, so the figure says itself what it counts. */
+function columnsOf(front: Front, chosen: Chosen, narrow: boolean): Column<Portfolio>[] {
   const { portfolios, knee, costAxis, ceiling } = front;
   const sign = currencySign(ceiling.currency);
   const gained = ({ index, benefit }: Portfolio) => {
     const before = portfolios[index - 1];
-    return before ? `+${formatNumber(benefit - before.benefit, 4)}` : '—';
+    if (!before) return narrow ? 'the cheapest' : '—';
+    return `+${formatNumber(benefit - before.benefit, 4)}${narrow ? ' points gained' : ''}`;
   };
   const cost: Column<Portfolio> = {
     id: 'cost',
@@ -73,7 +77,7 @@ function columnsOf(front: Front, chosen: Chosen): Column<Portfolio>[] {
     id: 'capital',
     header: `Capital, ${sign}`,
     align: 'end',
-    cell: ({ exact }) => formatAmount(exact.capital),
+    cell: ({ exact }) => `${formatAmount(exact.capital)}${narrow ? ` ${sign} capital` : ''}`,
   };
   return [
     cost,
@@ -86,7 +90,12 @@ function columnsOf(front: Front, chosen: Chosen): Column<Portfolio>[] {
       cell: ({ exact }) => formatNumber(exact.benefit, 4),
     },
     { id: 'gained', header: 'Points gained', align: 'end', cell: gained },
-    { id: 'candidates', header: 'Candidates', align: 'end', cell: ({ picks }) => picks.length },
+    {
+      id: 'candidates',
+      header: 'Candidates',
+      align: 'end',
+      cell: ({ picks }) => `${picks.length}${narrow ? ' candidates' : ''}`,
+    },
     {
       id: 'remark',
       header: 'Remark',

@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
 import styled from 'styled-components';
+import { formatMoneyWhole } from '../../lib/money';
 import { Button } from '../../ui/button';
 import { CompositionList } from './composition-list';
 import type { Front } from './front';
@@ -32,6 +33,9 @@ export function PortfolioPanel({ front, chosen, leftOut, footer }: PortfolioPane
           </Button>
         </Title>
         <PortfolioFigures front={front} selected={selected} compared={compared} />
+        <p className="muted tiny">
+          The ceiling is {formatMoneyWhole(front.ceiling)} of capital, the share held back taken off.
+        </p>
       </Top>
       <Scroll tabIndex={0} role="group" aria-label="Candidates of the run">
         <CompositionList front={front} selected={selected} />
