@@ -16,7 +16,7 @@ await builder.init();
 const providers = providersOf(AppModule);
 const schema = await builder
   .get(GraphQLSchemaFactory)
-  .create(providers.filter(isResolver) as never[], providers.filter(isScalar) as never[]);
+  .create(providers.filter(isResolver), providers.filter(isScalar) as never[]);
 checkRolesCover(schema);
 
 writeFileSync(join(folder, 'schema.graphql'), `${printSchema(lexicographicSortSchema(schema))}\n`);

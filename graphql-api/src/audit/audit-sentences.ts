@@ -38,7 +38,7 @@ export interface AuditData {
   [name: string]: string | number | boolean | null | undefined;
 }
 
-export function sentenceOf(action: string, data: Record<string, unknown>): string {
+export function sentenceOf(action: string, data: AuditData): string {
   const sentence = (SENTENCES as Record<string, ((data: Record<string, string>) => string) | undefined>)[
     action
   ];

@@ -6,7 +6,7 @@ import {
   type OnApplicationShutdown,
 } from '@nestjs/common';
 import { DiscoveryService } from '@nestjs/core';
-import { run, type Runner, type TaskList } from 'graphile-worker';
+import { run, type Runner, type Task, type TaskList } from 'graphile-worker';
 import { WORKER_ENV, type WorkerEnv } from '../config/worker-env.js';
 import { runInScope } from '../tenancy/request-context.js';
 import { JobHandler, type HandlesJob } from './job-handler.decorator.js';
@@ -43,18 +43,16 @@ export class JobRunnerService implements OnApplicationBootstrap, OnApplicationSh
   }
 
   private taskList(): TaskList {
-    const handlers = this.discovery
-      .getProviders({ metadataKey: JobHandler.KEY })
-      .map(
-        (wrapper) => [this.discovery.getMetadataByDecorator(JobHandler, wrapper), wrapper.instance] as const,
-      );
-    return Object.fromEntries(
-      handlers.map(([task, handler]) => [task, this.inOrganisation(handler as HandlesJob<JobTask>)]),
-    );
+    const wrappers = this.discovery.getProviders({ metadataKey: JobHandler.KEY });
+    const entries = wrappers.map((wrapper): [JobTask | undefined, Task] => [
+      this.discovery.getMetadataByDecorator(JobHandler, wrapper),
+      this.inOrganisation(wrapper.instance as HandlesJob<JobTask>),
+    ]);
+    return Object.fromEntries(entries);
   }
 
-  private inOrganisation(handler: HandlesJob<JobTask>) {
-    return async (envelope: unknown, { job }: { job: { id: string; task_identifier: string } }) => {
+  private inOrganisation(handler: HandlesJob<JobTask>): Task {
+    return async (envelope, { job }) => {
       const { organisationId, payload } = envelope as Envelope;
       const caller = { organisationId, membershipId: null, userId: null, sessionId: null, roles: [] };
       this.log.log(`${job.task_identifier} ${job.id} organisation ${organisationId}`);

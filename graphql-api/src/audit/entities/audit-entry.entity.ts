@@ -1,4 +1,5 @@
 import { Column, Entity, PrimaryColumn } from 'typeorm';
+import type { AuditData } from '../audit-sentences.js';
 import { safeInteger } from '../../common/bigint.transformer.js';
 
 /** One line of the append-only trail. Written by the database function only. */
@@ -10,5 +11,5 @@ export class AuditEntryRow {
   @Column('text') action: string;
   @Column('uuid', { nullable: true }) roundId: string | null;
   @Column('uuid', { nullable: true }) objectId: string | null;
-  @Column('jsonb') data: Record<string, unknown>;
+  @Column('jsonb') data: AuditData;
 }
