@@ -44,8 +44,8 @@ export class JobRunnerService implements OnApplicationBootstrap, OnApplicationSh
 
   private taskList(): TaskList {
     const wrappers = this.discovery.getProviders({ metadataKey: JobHandler.KEY });
-    const entries = wrappers.map((wrapper): [JobTask | undefined, Task] => [
-      this.discovery.getMetadataByDecorator(JobHandler, wrapper),
+    const entries = wrappers.map((wrapper): [JobTask, Task] => [
+      this.discovery.getMetadataByDecorator(JobHandler, wrapper)!,
       this.inOrganisation(wrapper.instance as HandlesJob<JobTask>),
     ]);
     return Object.fromEntries(entries);
