@@ -1,8 +1,13 @@
+import { fileURLToPath } from 'node:url';
 import react from '@vitejs/plugin-react';
 import { defineConfig } from 'vitest/config';
 
+// Its build for Node has no element behind the announcements that Primer makes.
+const liveRegion = new URL('../node_modules/@primer/live-region-element/dist/esm/index.js', import.meta.url);
+
 export default defineConfig({
   plugins: [react()],
+  resolve: { alias: { '@primer/live-region-element': fileURLToPath(liveRegion) } },
   test: {
     environment: 'jsdom',
     include: ['src/**/*.test.{ts,tsx}'],
