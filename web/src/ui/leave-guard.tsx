@@ -1,4 +1,4 @@
-import { useCallback, useEffect } from 'react';
+import { useEffect } from 'react';
 import type { ReactNode } from 'react';
 import { useBlocker } from 'react-router-dom';
 import type { BlockerFunction } from 'react-router-dom';
@@ -17,14 +17,18 @@ interface LeaveGuardProps {
 }
 
 /** Asks before the address changes or the window closes while something would be lost. */
-export function LeaveGuard({ when, title, children, leave, blocks = anyMove }: LeaveGuardProps) {
-  const blocker = useBlocker(useCallback<BlockerFunction>((move) => when && blocks(move), [when, blocks]));
+export function LeaveGuard({ when, ...guard }: LeaveGuardProps) {
+  // Set up only while it is needed, because the router listens to one guard at a time: the one set up last.
+  return when ? <Guard {...guard} /> : null;
+}
+
+function Guard({ title, children, leave, blocks = anyMove }: Omit<LeaveGuardProps, 'when'>) {
+  const blocker = useBlocker(blocks);
   useEffect(() => {
-    if (!when) return;
     const warn = (event: BeforeUnloadEvent) => event.preventDefault();
     window.addEventListener('beforeunload', warn);
     return () => window.removeEventListener('beforeunload', warn);
-  }, [when]);
+  }, []);
   if (blocker.state !== 'blocked') return null;
   return (
     <ConfirmDialog title={title} confirm={leave} danger onConfirm={blocker.proceed} onClose={blocker.reset}>
