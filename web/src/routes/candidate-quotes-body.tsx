@@ -5,7 +5,6 @@ import { UploadZone } from '../features/documents/upload-zone';
 import { QuoteFormDialog } from '../features/quotes/quote-form-dialog';
 import { WhyThisQuote } from '../features/quotes/why-this-quote';
 import { useCan } from '../lib/use-can';
-import { useViewer } from '../lib/viewer';
 import { announce } from '../ui/announce';
 import { Button } from '../ui/button';
 import { Empty } from '../ui/empty';
@@ -20,11 +19,11 @@ interface BodyProps {
   /** Whether quotes may be entered and changed now, by this member. */
   mayEnter: boolean;
   frozen: boolean;
-  /** A paper has been stored. */
+  /** A document has been stored. */
   onStored: () => void;
 }
 
-/** Papers at the left, costs and choice at the right; one below the other where there is no room. */
+/** Documents at the left, costs and choice at the right; one below the other where there is no room. */
 export function CandidateQuotesBody({ data, dialog, mayEnter, frozen, onStored }: BodyProps) {
   const { candidate, round } = data;
   const can = useCan();
@@ -34,10 +33,10 @@ export function CandidateQuotesBody({ data, dialog, mayEnter, frozen, onStored }
   }
   return (
     <Columns>
-      <Papers>
+      <Side>
         {can('startUpload') && !frozen && <UploadZone candidateId={candidate.id} onStored={stored} />}
         <Documents data={data} mayEnter={mayEnter} dialog={dialog} />
-      </Papers>
+      </Side>
       {candidate.quotes.length > 0 ? (
         <Costs>
           <CostSection
@@ -88,7 +87,6 @@ function Documents({ data, mayEnter, dialog }: Pick<BodyProps, 'data' | 'mayEnte
 }
 
 function FormDialog({ data, dialog }: Pick<BodyProps, 'data' | 'dialog'>) {
-  const { currency } = useViewer().organisation;
   const { candidate, round } = data;
   const quote = candidate.quotes.find(({ id }) => id === dialog.quote);
   if (!quote && dialog.quote !== 'new') return null;
@@ -98,7 +96,7 @@ function FormDialog({ data, dialog }: Pick<BodyProps, 'data' | 'dialog'>) {
       candidate={candidate}
       quote={quote}
       document={candidate.documents.find(({ id }) => id === dialog.documentId)}
-      currencies={[currency, ...round.exchangeRates.map((rate) => rate.currency)]}
+      currencies={[candidate.worksNet.currency, ...round.exchangeRates.map((rate) => rate.currency)]}
       vatRate={Number(round.vatRate)}
       onClose={dialog.close}
     />
@@ -129,7 +127,7 @@ function NoQuotes({ onEnter }: { onEnter?: () => void }) {
         }
       >
         A quote is what a vendor asks for this candidate. Once its figures are in, its life-cycle cost stands
-        here beside those of the others. The paper itself belongs among the documents.
+        here beside those of the others. What the vendor sent belongs among the documents.
       </Empty>
     </Section>
   );
@@ -148,7 +146,7 @@ const Columns = styled.div`
   }
 `;
 
-const Papers = styled.div`
+const Side = styled.div`
   display: grid;
   gap: 16px;
   min-width: 0;

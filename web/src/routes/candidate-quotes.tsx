@@ -74,7 +74,7 @@ export async function loader({ params }: LoaderFunctionArgs) {
 
 export const shouldRevalidate = unlessOnly('quote', 'document');
 
-/** The quotes of one candidate: papers, what each costs over its life, and which one counts. */
+/** The quotes of one candidate: documents, what each costs over its life, and which one counts. */
 export function Component() {
   const { queryRef, neighbours } = useLoaderData<Awaited<ReturnType<typeof loader>>>();
   const { data } = useReadQuery(queryRef);

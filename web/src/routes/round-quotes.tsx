@@ -138,7 +138,7 @@ function NoQuotes({ roundId }: { roundId: string }) {
         </ButtonLink>
       }
     >
-      A quote belongs to a candidate: open one, upload the vendor’s paper and enter its figures.
+      A quote belongs to a candidate: open one, upload what the vendor sent and enter its figures.
     </Empty>
   );
 }

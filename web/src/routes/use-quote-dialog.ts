@@ -3,7 +3,7 @@ import { useSearchParams } from 'react-router-dom';
 export interface QuoteDialog {
   /** "new", the id of the quote to change, or null while no dialog is open. */
   quote: string | null;
-  /** The paper whose figures are entered. */
+  /** The document whose figures are entered. */
   documentId: string | null;
   open: (quote: string, documentId?: string) => void;
   close: () => void;

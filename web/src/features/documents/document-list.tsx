@@ -26,12 +26,12 @@ interface DocumentListProps {
   aside?: (document: ListedDocumentFragment) => ReactNode;
 }
 
-/** The papers of a candidate, each to be opened. */
+/** The documents of a candidate, each to be opened. */
 export function DocumentList({ documents, aside }: DocumentListProps) {
   return (
     <Section title="Documents" aside={documents.length > 0 && String(documents.length)}>
       {documents.length === 0 ? (
-        <None>No paper yet. A quote that comes as a letter or a sheet belongs here, beside its figures.</None>
+        <None>None yet. A quote that comes as a letter or a sheet belongs here, beside its figures.</None>
       ) : (
         <ul>
           {documents.map((document) => (

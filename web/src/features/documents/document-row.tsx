@@ -43,8 +43,7 @@ function FileName({ id, name }: { id: string; name: string }) {
     }
   }
   return (
-    <Open type="button" disabled={opening} onClick={() => void open()}>
-      <span className="visually-hidden">Download </span>
+    <Open type="button" aria-label={`Download ${name}`} disabled={opening} onClick={() => void open()}>
       {name}
     </Open>
   );

@@ -15,7 +15,7 @@ export interface QuoteFormDialogProps {
   candidate: { id: string; name: string; quantity: number };
   /** The quote to change; undefined for a new one. */
   quote?: QuoteFigures;
-  /** The paper that holds the figures. */
+  /** The document that holds the figures. */
   document?: { id: string; fileName: string };
   currencies: readonly [own: string, ...others: string[]];
   /** As a share: 0.2 for 20 %. */

@@ -12,7 +12,7 @@ interface Target {
   candidateId: string;
   /** The stored quote as it is now; undefined for a new one. */
   quote?: QuoteFigures;
-  /** A paper that the saved quote is to have. */
+  /** A document that the saved quote is to have. */
   documentId?: string;
 }
 
