@@ -5,6 +5,9 @@ import { afterEach } from 'vitest';
 afterEach(cleanup);
 // The first test of a page also waits for its modules to be compiled.
 configure({ asyncUtilTimeout: 15_000 });
+// Events go out as in a browser. Within a synchronous `act`, a page that reads a promise with `use` and takes longer than
+// one slice to draw stays in act's queue, which nobody flushes: the page would then never change again.
+configure({ eventWrapper: (dispatch) => dispatch() });
 
 // What jsdom lacks and Primer asks for.
 window.matchMedia = (media: string) =>
