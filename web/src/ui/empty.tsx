@@ -66,11 +66,11 @@ const Box = styled.div<{ $plain: boolean }>`
   align-items: flex-start;
   justify-content: center;
   padding: ${({ $plain }) => ($plain ? '32px' : '64px')} clamp(16px, 9%, 120px);
-  svg {
+  > svg {
     width: min(100%, 560px);
     margin-bottom: 28px;
   }
-  h2 {
+  > h2 {
     font-size: var(--mw-t-20);
   }
 `;
