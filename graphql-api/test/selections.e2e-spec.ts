@@ -151,7 +151,7 @@ describe('a submitted portfolio', () => {
     expect(await round()).toEqual({ stage: 'DECIDE', selections: [{ id, number: 1, state: 'SUBMITTED' }] });
     expect((await trail()).slice(0, 2)).toEqual([
       {
-        sentence: 'Round moved from SEARCH to DECIDE',
+        sentence: 'Round moved from Search to Decide',
         detail: 'Memo 1 submitted',
         by: { name: 'Callum Reed' },
       },
@@ -282,7 +282,7 @@ describe('a submitted portfolio', () => {
     expect((await round()).stage).toBe('SEARCH');
     expect((await trail()).slice(0, 2)).toEqual([
       {
-        sentence: 'Round moved from DECIDE to SEARCH',
+        sentence: 'Round moved from Decide to Search',
         detail: 'Memo 1 returned',
         by: { name: 'Priya Nair' },
       },
