@@ -31,7 +31,7 @@ function show(next: News | undefined) {
 export function Announcements() {
   const current = useSyncExternalStore(subscribe, () => news);
   return (
-    <Place data-screen-only>
+    <Place aria-label="Messages" data-screen-only>
       <AriaStatus announceOnShow>{current?.text}</AriaStatus>
       {current && (
         <Toast key={current.id}>
@@ -49,7 +49,7 @@ function subscribe(listener: () => void): () => void {
   return () => listeners.delete(listener);
 }
 
-const Place = styled.div`
+const Place = styled.section`
   position: fixed;
   left: 50%;
   bottom: 24px;

@@ -19,7 +19,7 @@ export function CombinedSheet({ candidates, criteria, scores, membershipId }: Co
   const byCell = useMemo(() => groupByCell(scores), [scores]);
   return (
     <Section>
-      <Scroll>
+      <Scroll role="region" aria-label="Scores of all assessors" tabIndex={0}>
         <Grid>
           <caption className="visually-hidden">Mean scores of all assessors</caption>
           <thead>
