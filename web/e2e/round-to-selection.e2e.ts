@@ -1,6 +1,15 @@
 import type { Browser, Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
-import { close, inboxUrl, newPage, open, picture, signIn, startBrowser } from './browser';
+import {
+  accessibilityProblems,
+  close,
+  inboxUrl,
+  newPage,
+  open,
+  picture,
+  signIn,
+  startBrowser,
+} from './browser';
 import { quotePdf } from './quote-pdf';
 
 const COORDINATOR = 'hanne.vos@marrowfen.example';
@@ -22,6 +31,11 @@ async function as(email: string, work: (page: Page) => Promise<void>) {
   expect(person.complaints).toEqual([]);
   await close(person);
 }
+
+const LOOKS = [
+  ['dark', { width: 1440, height: 900, dark: true }],
+  ['narrow', { width: 390, height: 844 }],
+] as const;
 
 describe('a round, from a quote to an approved portfolio', () => {
   it('lets the coordinator upload a quote, enter its figures, see what it costs over its life, and keep it', () =>
@@ -58,6 +72,7 @@ describe('a round, from a quote to an approved portfolio', () => {
         .first()
         .waitFor();
       await picture(page, 'journey-2-compared');
+      expect(await accessibilityProblems(page)).toEqual([]);
 
       await page.getByRole('button', { name: 'Choose another' }).click();
       await page.getByRole('radio', { name: /Hollowmere/u }).check();
@@ -77,6 +92,7 @@ describe('a round, from a quote to an approved portfolio', () => {
       await page.getByRole('heading', { name: 'You have given 280 of 280 scores' }).waitFor();
       await page.getByText(/^Saved,/u).waitFor();
       await picture(page, 'journey-4-scored');
+      expect(await accessibilityProblems(page)).toEqual([]);
       await page.reload();
       await page.getByRole('heading', { name: 'You have given 280 of 280 scores' }).waitFor();
     }));
@@ -104,6 +120,7 @@ describe('a round, from a quote to an approved portfolio', () => {
       expect(byPointer).toMatch(/^Portfolio A, .* points$/u);
       expect(byKey).not.toBe(byPointer);
       await picture(page, 'journey-6-chosen');
+      expect(await accessibilityProblems(page)).toEqual([]);
 
       await page.getByRole('button', { name: 'Send A for approval' }).click();
       const dialog = page.getByRole('dialog');
@@ -128,6 +145,7 @@ describe('a round, from a quote to an approved portfolio', () => {
         .waitFor();
       expect(await page.getByRole('button', { name: /^Approve/u }).count()).toBe(0);
       await picture(page, 'journey-8-approved');
+      expect(await accessibilityProblems(page)).toEqual([]);
     }));
 
   it('tells the finance director of the submission and the coordinator of the decision by letter', async () => {
@@ -140,5 +158,22 @@ describe('a round, from a quote to an approved portfolio', () => {
     expect(text).toMatch(/\/rounds\/[0-9a-f-]+\/approval/u);
     await picture(inbox.page, 'journey-9-letters');
     await close(inbox);
+  });
+
+  it.each(LOOKS)('leaves pages that read well and pass axe, %s', async (look, options) => {
+    const person = await newPage(browser, options);
+    const { page } = person;
+    await signIn(page, COORDINATOR);
+    const round = page.url().replace(/\/[a-z]+$/u, '');
+    for (const screen of ['scoring', 'frontier', 'approval']) {
+      await page.goto(`${round}/${screen}`);
+      await page.getByRole('heading', { level: 1 }).waitFor();
+      await page.waitForLoadState('networkidle');
+      expect([screen, await accessibilityProblems(page)]).toEqual([screen, []]);
+      expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBe(options.width);
+      await picture(page, `decided-${screen}-${look}`);
+    }
+    expect(person.complaints).toEqual([]);
+    await close(person);
   });
 });
