@@ -18,7 +18,7 @@ export function refusalOf(error: unknown, labels: Readonly<Record<string, string
   const known = Object.entries(fieldErrors(error))
     .map(([path, message]) => [path.split('.').at(-1)!, message] as const)
     .filter(([field]) => field in labels)
-    .map(([field, message]) => [field, inWords(message, field, labels[field]!)]);
+    .map(([field, message]): [string, string] => [field, inWords(message, field, labels[field]!)]);
   if (known.length > 0) return { kind: 'fields', problems: Object.fromEntries(known) };
   return { kind: 'message', message: errorMessage(error) };
 }

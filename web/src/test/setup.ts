@@ -7,7 +7,7 @@ afterEach(cleanup);
 configure({ asyncUtilTimeout: 15_000 });
 // Events go out as in a browser. Within a synchronous `act`, a page that reads a promise with `use` and takes longer than
 // one slice to draw stays in act's queue, which nobody flushes: the page would then never change again.
-configure({ eventWrapper: (dispatch) => dispatch() });
+configure({ eventWrapper: (dispatch): unknown => dispatch() });
 
 // What jsdom lacks and Primer asks for.
 window.matchMedia = (media: string) =>

@@ -1,8 +1,10 @@
 import { useId, useState } from 'react';
 import { currencySign, formatMoney } from '../../lib/money';
+import { formatQuantity } from '../../lib/quantity';
 import { readAmount } from '../../lib/read-amount';
 import { refusalOf } from '../../lib/refusal';
 import type { FieldProblems } from '../../lib/refusal';
+import { typedText } from '../../lib/typed-text';
 import { useReload } from '../../lib/use-reload';
 import { announce } from '../../ui/announce';
 import { Button } from '../../ui/button';
@@ -90,7 +92,7 @@ export function CeilingDialog({ round, onClose }: CeilingDialogProps) {
             unit="%"
             inputMode="decimal"
             autoComplete="off"
-            defaultValue={round.heldBackPercent}
+            defaultValue={formatQuantity(round.heldBackPercent)}
             help="Kept for what comes up between the decision and the order."
             error={problems.heldBackPercent}
           />
@@ -105,7 +107,7 @@ function Conflict({ round, onKeepMine }: { round: RoundCeilingFragment; onKeepMi
     <Notice
       tone="caution"
       alert
-      title={`The round was changed meanwhile. Its ceiling now is ${formatMoney(round.ceiling)}, ${round.heldBackPercent} % held back.`}
+      title={`The round was changed meanwhile. Its ceiling now is ${formatMoney(round.ceiling)}, ${formatQuantity(round.heldBackPercent)}\u00a0% held back.`}
       actions={<Button onClick={onKeepMine}>Go on with mine</Button>}
     >
       Nothing was saved. What you typed stands below.
@@ -114,8 +116,8 @@ function Conflict({ round, onKeepMine }: { round: RoundCeilingFragment; onKeepMi
 }
 
 function readForm(data: FormData) {
-  const ceiling = String(data.get('ceiling'));
-  const percent = readAmount(String(data.get('heldBackPercent')));
+  const ceiling = typedText(data, 'ceiling');
+  const percent = readAmount(typedText(data, 'heldBackPercent'));
   const wrong: FieldProblems = {};
   if (!ceiling) wrong.ceiling = 'Write the ceiling as an amount, such as 2 400 000.';
   if (!('amount' in percent)) wrong.heldBackPercent = 'Write the share held back as a percent, such as 4.';

@@ -1,8 +1,9 @@
 import type { ReactNode } from 'react';
 import styled from 'styled-components';
 import { canChangeContents } from '../../lib/can-change-contents';
-import { currencySign, formatAmountWhole, formatNumber } from '../../lib/money';
+import { currencySign, formatAmountWhole } from '../../lib/money';
 import type { Amount } from '../../lib/money';
+import { formatQuantity } from '../../lib/quantity';
 import { useCan } from '../../lib/use-can';
 import { Button } from '../../ui/button';
 import { Section } from '../../ui/section';
@@ -76,7 +77,7 @@ function Aside({ currency, onEdit }: { currency: string; onEdit?: () => void }) 
 
 function heldBack(percent: string): string {
   if (Number(percent) === 0) return 'may be spent';
-  return `may be spent, ${formatNumber(Number(percent), percent.includes('.') ? 1 : 0)}\u00a0% held back`;
+  return `may be spent, ${formatQuantity(percent)}\u00a0% held back`;
 }
 
 // Both amounts hold whole minor units below 2^53, and what is shown is rounded to whole units.

@@ -2,6 +2,7 @@ import { useId, useState } from 'react';
 import type { RoundStage } from '../../generated/graphql';
 import { refusalOf } from '../../lib/refusal';
 import type { FieldProblems } from '../../lib/refusal';
+import { typedText } from '../../lib/typed-text';
 import { announce } from '../../ui/announce';
 import { Button } from '../../ui/button';
 import { CheckedForm } from '../../ui/checked-form';
@@ -25,7 +26,7 @@ export function StepBackDialog({ round, onClose }: StepBackDialogProps) {
   if (!words) return null;
 
   async function submit(form: HTMLFormElement, done: string) {
-    const reason = String(new FormData(form).get('reason')).trim();
+    const reason = typedText(new FormData(form), 'reason');
     setMessage(undefined);
     if (reason.length < 3) return setProblems({ reason: 'Write why the round goes back.' });
     setProblems({});
