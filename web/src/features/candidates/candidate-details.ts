@@ -92,23 +92,31 @@ export const CANDIDATE_DETAILS: TypedDocumentNode<CandidateDetailsFragment> = gq
       most
       reason
       candidate {
-        ...LinkedCandidate
+        id
+        code
+        name
+        quoteInForce {
+          id
+          cost {
+            capital {
+              amount
+              currency
+            }
+          }
+        }
       }
       members {
-        ...LinkedCandidate
-      }
-    }
-  }
-  fragment LinkedCandidate on Candidate {
-    id
-    code
-    name
-    quoteInForce {
-      id
-      cost {
-        capital {
-          amount
-          currency
+        id
+        code
+        name
+        quoteInForce {
+          id
+          cost {
+            capital {
+              amount
+              currency
+            }
+          }
         }
       }
     }

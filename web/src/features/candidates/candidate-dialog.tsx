@@ -36,8 +36,7 @@ export function CandidateDialog(props: CandidateDialogProps) {
   const { title, sub, submit, initial, choices, notice, onClose } = props;
   const formId = useId();
   const [dirty, setDirty] = useState(false);
-  const saved = useRef(false);
-  const { send, saving, problems, message } = useSending(props, saved);
+  const { send, saving, problems, message, unsaved } = useSending(props);
   return (
     <Dialog
       title={title}
@@ -59,19 +58,17 @@ export function CandidateDialog(props: CandidateDialogProps) {
           <CandidateFields initial={initial} choices={choices} problems={problems} />
         </Fields>
       </CheckedForm>
-      <LeaveGuard
-        when={dirty}
-        blocks={useCallback(() => !saved.current, [])}
-        title="Leave without saving?"
-        leave="Leave"
-      >
+      <LeaveGuard when={dirty} blocks={unsaved} title="Leave without saving?" leave="Leave">
         What you typed into this form would be lost.
       </LeaveGuard>
     </Dialog>
   );
 }
 
-function useSending({ save, onSaved, onConflict }: CandidateDialogProps, saved: { current: boolean }) {
+function useSending({ save, onSaved, onConflict }: CandidateDialogProps) {
+  // A ref, because the dialog closes in the same breath in which it is saved.
+  const saved = useRef(false);
+  const unsaved = useCallback(() => !saved.current, []);
   const [saving, setSaving] = useState(false);
   const [problems, setProblems] = useState<FieldProblems>({});
   const [message, setMessage] = useState<string>();
@@ -98,7 +95,7 @@ function useSending({ save, onSaved, onConflict }: CandidateDialogProps, saved: 
     }
   }
 
-  return { send, saving, problems, message };
+  return { send, saving, problems, message, unsaved };
 }
 
 const Fields = styled.div`

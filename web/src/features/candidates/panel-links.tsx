@@ -4,10 +4,11 @@ import { sumOf } from '../../lib/minor-units';
 import { formatMoneyWhole } from '../../lib/money';
 import { Icon } from '../../ui/icon';
 import type { IconName } from '../../ui/icon';
-import type { CandidateDetailsFragment, LinkedCandidateFragment } from './candidate-details.generated';
+import type { CandidateDetailsFragment } from './candidate-details.generated';
 import { withPanel } from './candidate-list-params';
 
 type CandidateLink = CandidateDetailsFragment['links'][number];
+type Linked = CandidateLink['members'][number];
 
 /** What a candidate needs, what needs it, and what it excludes. */
 export function PanelLinks({ candidate }: { candidate: CandidateDetailsFragment }) {
@@ -40,7 +41,7 @@ function Others({ link, own }: { link: CandidateLink; own: string }) {
 }
 
 /** The candidates at the far side of a link, seen from `own`. */
-function othersOf(link: CandidateLink, own: string): LinkedCandidateFragment[] {
+function othersOf(link: CandidateLink, own: string): Linked[] {
   const needsOwn = link.kind === 'NEEDS' && link.candidate && link.candidate.id !== own;
   if (needsOwn) return [link.candidate!];
   return link.members.filter(({ id }) => id !== own);
@@ -67,7 +68,7 @@ function reasonOf({ reason }: CandidateLink): string {
 }
 
 /** The capital of a candidate with what it needs; nothing as long as one of them has no quote in force. */
-function together(candidate: CandidateDetailsFragment, others: readonly LinkedCandidateFragment[]): string {
+function together(candidate: CandidateDetailsFragment, others: readonly Linked[]): string {
   const capitals = [candidate, ...others].map(({ quoteInForce }) => quoteInForce?.cost.capital);
   const known = capitals.filter((capital) => capital !== undefined);
   if (known.length < capitals.length) return '';

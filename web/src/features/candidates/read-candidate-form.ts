@@ -1,6 +1,7 @@
 import type { CandidateFieldsInput, CandidateKind } from '../../generated/graphql';
 import { readAmount } from '../../lib/read-amount';
 import type { FieldProblems } from '../../lib/refusal';
+import { typedText } from '../../lib/typed-text';
 
 export interface ReadCandidate {
   fields: CandidateFieldsInput;
@@ -11,7 +12,7 @@ export interface ReadCandidate {
 /** Reads what was typed into the candidate form. */
 export function readCandidateForm(data: FormData): ReadCandidate {
   const problems: FieldProblems = {};
-  const text = (name: keyof CandidateFieldsInput) => String(data.get(name) ?? '').trim();
+  const text = (name: keyof CandidateFieldsInput) => typedText(data, name);
   const filled = (name: keyof CandidateFieldsInput, problem: string) => {
     if (!text(name)) problems[name] = problem;
     return text(name);

@@ -34,20 +34,16 @@ const UPDATE_CANDIDATE: TypedDocumentNode<UpdateCandidateMutation, UpdateCandida
   ${CANDIDATE_DETAILS}
 `;
 
-type Saved = CreateCandidateMutation['createCandidate'];
+export type Saved = CreateCandidateMutation['createCandidate'];
 
 /** Adds and changes candidates. Gives the candidate, or why it needs a reason to be mandatory. */
 export function useSaveCandidate() {
   const [createCandidate] = useMutation(CREATE_CANDIDATE, { refetchQueries: 'active' });
   const [updateCandidate] = useMutation(UPDATE_CANDIDATE, { refetchQueries: 'active' });
   return {
-    async create(input: CreateCandidateInput): Promise<Saved> {
-      return (await createCandidate({ variables: { input } })).data!.createCandidate;
-    },
-    async update(input: UpdateCandidateInput): Promise<Saved> {
-      return (await updateCandidate({ variables: { input } })).data!.updateCandidate;
-    },
+    create: async (input: CreateCandidateInput): Promise<Saved> =>
+      (await createCandidate({ variables: { input } })).data!.createCandidate,
+    update: async (input: UpdateCandidateInput): Promise<Saved> =>
+      (await updateCandidate({ variables: { input } })).data!.updateCandidate,
   };
 }
-
-export type { Saved };
