@@ -1,11 +1,12 @@
 import type { LimitFieldsInput, LimitMeasure } from '../../generated/graphql';
 import { readAmount } from '../../lib/read-amount';
 import type { FieldProblems } from '../../lib/refusal';
+import { typedText } from '../../lib/typed-text';
 
 /** Reads what was typed into the limit form; a bound left empty does not bind. */
 export function readLimitForm(data: FormData): { fields: LimitFieldsInput; problems: FieldProblems } {
   const problems: FieldProblems = {};
-  const text = (name: keyof LimitFieldsInput) => String(data.get(name) ?? '').trim();
+  const text = (name: keyof LimitFieldsInput) => typedText(data, name);
   const bound = (name: 'least' | 'most') => {
     if (!text(name)) return null;
     const read = readAmount(text(name));

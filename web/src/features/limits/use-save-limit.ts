@@ -47,11 +47,9 @@ export function useSaveLimit() {
   const [createLimit] = useMutation(CREATE_LIMIT, { refetchQueries: 'active' });
   const [updateLimit] = useMutation(UPDATE_LIMIT, { refetchQueries: 'active' });
   return {
-    async create(input: CreateLimitInput): Promise<SavedLimit> {
-      return (await createLimit({ variables: { input } })).data!.createLimit;
-    },
-    async update(input: UpdateLimitInput): Promise<SavedLimit> {
-      return (await updateLimit({ variables: { input } })).data!.updateLimit;
-    },
+    create: async (input: CreateLimitInput): Promise<SavedLimit> =>
+      (await createLimit({ variables: { input } })).data!.createLimit,
+    update: async (input: UpdateLimitInput): Promise<SavedLimit> =>
+      (await updateLimit({ variables: { input } })).data!.updateLimit,
   };
 }
