@@ -3,7 +3,7 @@ import type { TypedDocumentNode } from '@apollo/client';
 import { useSuspenseQuery } from '@apollo/client/react';
 import { useParams, useSearchParams } from 'react-router-dom';
 import type { LoaderFunctionArgs, ShouldRevalidateFunctionArgs } from 'react-router-dom';
-import { isScoring, NoRunYet } from '../features/frontier/no-run-yet';
+import { NoRunYet } from '../features/frontier/no-run-yet';
 import { RUN_LISTED } from '../features/frontier/run-choice';
 import { RunPage } from '../features/frontier/run-page';
 import { RunAgain } from '../features/frontier/start-search';
@@ -51,12 +51,12 @@ export function Component() {
   const [params] = useSearchParams();
   const { round } = useSuspenseQuery(ROUND_FRONTIER, { variables: { id: roundId } }).data;
   const can = useCan();
-  const searching = !isScoring(round.stage) && round.stage !== 'CLOSED';
+  const searching = round.stage === 'SEARCH';
   const run = chosenRun(round.runs, params.get('run'));
   if (!run)
     return (
       <Page>
-        <NoRunYet round={round} mayStart={can('startSearch')} />
+        <NoRunYet round={round} mayStart={searching && can('startSearch')} />
       </Page>
     );
   return (

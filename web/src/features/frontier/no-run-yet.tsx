@@ -25,7 +25,7 @@ export function NoRunYet({ round, mayStart }: NoRunYetProps) {
 }
 
 /** Scores are what a search adds up: until they are closed there is nothing to weigh. */
-export function isScoring(stage: RoundStage): boolean {
+function isScoring(stage: RoundStage): boolean {
   return stage === 'GATHER' || stage === 'SCORE';
 }
 
@@ -48,7 +48,8 @@ function Ready({ round, mayStart }: NoRunYetProps) {
         A search looks at up to 20 million portfolios of this round’s candidates, under all limits and links,
         and keeps those that no other one beats in both benefit and cost. It takes well under a minute, shows
         the best found so far at once, and can be stopped at any time; what it has found is kept.
-        {!mayStart && ' A purchasing coordinator starts it.'}
+        {!mayStart &&
+          ' A purchasing coordinator or finance director starts it while the round is at its search.'}
       </Empty>
       {mayStart && (
         <Form>
