@@ -9,6 +9,7 @@ export type ErrorCode =
   | 'CONFLICT'
   | 'WRONG_STAGE'
   | 'TOO_MANY_REQUESTS'
+  | 'STORAGE_UNAVAILABLE'
   | 'INTERNAL_SERVER_ERROR'
   | 'OFFLINE';
 
@@ -20,6 +21,7 @@ const KNOWN: ReadonlySet<string> = new Set<ErrorCode>([
   'CONFLICT',
   'WRONG_STAGE',
   'TOO_MANY_REQUESTS',
+  'STORAGE_UNAVAILABLE',
 ]);
 
 /** No answer came at all. */

@@ -27,7 +27,7 @@ const Place = styled.div`
 
 const Label = styled.span<{ $above?: boolean }>`
   position: absolute;
-  ${({ $above }) => ($above ? 'top: 0; transform: translateX(50%);' : 'bottom: 0;')}
+  ${({ $above }) => ($above ? 'top: 0;' : 'bottom: 0;')}
   font-size: 13px;
   font-weight: 600;
   white-space: nowrap;

@@ -49,6 +49,8 @@ const Name = styled.span`
   font-size: 16px;
   font-weight: 700;
   @media (max-width: 767px) {
+    flex: 0 1 auto;
+    max-width: none;
     font-size: 13px;
   }
 `;
