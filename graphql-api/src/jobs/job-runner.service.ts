@@ -33,7 +33,7 @@ export class JobRunnerService implements OnApplicationBootstrap, OnApplicationSh
       connectionString: this.env.databaseWorkerUrl,
       concurrency: this.env.concurrency,
       noHandleSignals: true,
-      crontab: '',
+      parsedCronItems: [],
       taskList: this.taskList(),
     });
   }
