@@ -11,6 +11,11 @@ export function fromMinor(minor: number, currency: string): Amount {
   return { amount: (minor / 10 ** digits).toFixed(digits), currency };
 }
 
+/** `from` less `what`; both are in the same currency. */
+export function difference(from: Amount, what: Amount): Amount {
+  return fromMinor(toMinor(from) - toMinor(what), from.currency);
+}
+
 /** All of one currency. */
 export function sumOf(currency: string, amounts: readonly Amount[]): Amount {
   return fromMinor(

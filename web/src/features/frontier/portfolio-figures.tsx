@@ -1,6 +1,6 @@
 import styled from 'styled-components';
+import { difference } from '../../lib/minor-units';
 import { currencySign, formatAmountWhole } from '../../lib/money';
-import { difference } from './amounts';
 import type { Front } from './front';
 import type { Portfolio } from './portfolio';
 import { PortfolioLetter } from './portfolio-letter';

@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react';
 import styled from 'styled-components';
 import { canChangeContents } from '../../lib/can-change-contents';
+import { difference } from '../../lib/minor-units';
 import { currencySign, formatAmountWhole } from '../../lib/money';
 import type { Amount } from '../../lib/money';
 import { formatQuantity } from '../../lib/quantity';
@@ -80,17 +81,11 @@ function heldBack(percent: string): string {
   return `may be spent, ${formatQuantity(percent)}\u00a0% held back`;
 }
 
-// Both amounts hold whole minor units below 2^53, and what is shown is rounded to whole units.
 function compare(asked: Amount, { ceiling, spendable }: RoundCeilingFragment): string {
-  const difference = (from: Amount) =>
-    formatAmountWhole({
-      amount: String(Math.abs(Number(asked.amount) - Number(from.amount))),
-      currency: asked.currency,
-    });
-  if (Number(asked.amount) > Number(ceiling.amount)) return `${difference(ceiling)} more than the ceiling`;
-  if (Number(asked.amount) > Number(spendable.amount))
-    return `${difference(spendable)} more than may be spent`;
-  return `${difference(spendable)} left to spend`;
+  const more = (than: Amount) => formatAmountWhole(difference(asked, than));
+  if (Number(asked.amount) > Number(ceiling.amount)) return `${more(ceiling)} more than the ceiling`;
+  if (Number(asked.amount) > Number(spendable.amount)) return `${more(spendable)} more than may be spent`;
+  return `${formatAmountWhole(difference(spendable, asked))} left to spend`;
 }
 
 const Edge = styled.span`

@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest';
-import { difference } from './amounts';
+import { difference } from './minor-units';
 
 it.each([
   ['2304000.00', '2300556.00', 'EUR', '3444.00'],
