@@ -56,20 +56,20 @@ describe('all quotes of a round', () => {
   });
 
   it('are searched and filtered by the address', async () => {
-    const { user, asked, where } = await openPage([row('Oslander')], `${PATH}?search=echo&page=1`);
-    expect(screen.getByLabelText('Search')).toHaveValue('echo');
+    const { user, asked, where } = await openPage([row('Oslander')], `${PATH}?q=echo&page=1`);
+    expect(screen.getByRole('searchbox', { name: 'Find a quote' })).toHaveValue('echo');
     expect(asked()).toMatchObject({ filter: { search: 'echo', faultyOnly: false }, page: 1 });
     await user.click(screen.getByLabelText('Only with something to settle'));
-    await waitFor(() => expect(where()).toBe(`${PATH}?search=echo&only=to-settle`));
+    await waitFor(() => expect(where()).toBe(`${PATH}?q=echo&only=to-settle`));
     await waitFor(() => expect(asked()).toMatchObject({ filter: { search: 'echo', faultyOnly: true } }));
-    await user.clear(screen.getByLabelText('Search'));
-    await user.type(screen.getByLabelText('Search'), 'scan');
-    await waitFor(() => expect(where()).toBe(`${PATH}?search=scan&only=to-settle`));
+    await user.clear(screen.getByRole('searchbox', { name: 'Find a quote' }));
+    await user.type(screen.getByRole('searchbox', { name: 'Find a quote' }), 'scan');
+    await waitFor(() => expect(where()).toBe(`${PATH}?q=scan&only=to-settle`));
   });
 
   it('can be had back when the filters leave none', async () => {
-    const { user, where } = await openPage([], `${PATH}?search=nothing`);
-    await user.click(screen.getByRole('button', { name: 'Clear the filters' }));
+    const { user, where } = await openPage([], `${PATH}?q=nothing`);
+    await user.click(screen.getByRole('button', { name: 'Clear filters' }));
     await waitFor(() => expect(where()).toBe(PATH));
   });
 

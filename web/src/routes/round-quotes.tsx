@@ -1,7 +1,6 @@
 import { gql } from '@apollo/client';
 import type { TypedDocumentNode } from '@apollo/client';
 import { useReadQuery } from '@apollo/client/react';
-import { useCallback } from 'react';
 import { Navigate, useLoaderData, useSearchParams } from 'react-router-dom';
 import type { LoaderFunctionArgs } from 'react-router-dom';
 import { QuoteFilters } from '../features/quotes/quote-filters';
@@ -15,7 +14,7 @@ import { Button, ButtonLink } from '../ui/button';
 import { Empty } from '../ui/empty';
 import { Page, PageHeader } from '../ui/page';
 import { Pager } from '../ui/pager';
-import { readPage } from '../ui/use-table-params';
+import { readPage, withFilter } from '../ui/use-table-params';
 import type { RoundQuotesQuery, RoundQuotesQueryVariables } from './round-quotes.generated';
 
 const PAGE_SIZE = 50;
@@ -46,7 +45,7 @@ export function loader({ params, request }: LoaderFunctionArgs) {
   const query = new URL(request.url).searchParams;
   const variables = {
     roundId: params.roundId!,
-    filter: { search: query.get('search') ?? '', faultyOnly: query.get('only') === 'to-settle' },
+    filter: { search: query.get('q') ?? '', faultyOnly: query.get('only') === 'to-settle' },
     page: readPage(query),
     pageSize: PAGE_SIZE,
   };
@@ -58,7 +57,7 @@ export function Component() {
   const queryRef = useLoaderData<Awaited<ReturnType<typeof loader>>>();
   const { quotes, round } = useReadQuery(queryRef).data;
   const { organisation } = useViewer();
-  const { search, faultyOnly, page, setSearch, setFaultyOnly, clear } = useFilters();
+  const { filtered, faultyOnly, page, setFaultyOnly, clear } = useFilters();
   const pages = Math.ceil(quotes.total / PAGE_SIZE);
   if (page > Math.max(1, pages)) return <Navigate to={paths.quotes(round.id)} replace />;
   return (
@@ -68,17 +67,12 @@ export function Component() {
         windowTitle={pages > 1 ? `Quotes, page ${page} of ${pages}` : 'Quotes'}
         sub={summary(round)}
       />
-      <QuoteFilters
-        search={search}
-        onSearch={setSearch}
-        faultyOnly={faultyOnly}
-        onFaultyOnly={setFaultyOnly}
-      />
+      <QuoteFilters faultyOnly={faultyOnly} onFaultyOnly={setFaultyOnly} />
       <QuoteTable
         quotes={quotes.items}
         currencySign={currencySign(organisation.currency)}
         pathTo={(candidateId) => paths.candidateQuotes(round.id, candidateId)}
-        empty={search || faultyOnly ? <NothingFound onClear={clear} /> : <NoQuotes roundId={round.id} />}
+        empty={filtered ? <NothingFound onClear={clear} /> : <NoQuotes roundId={round.id} />}
         footer={
           quotes.total > 0 && <Pager page={page} pageSize={PAGE_SIZE} total={quotes.total} noun="quotes" />
         }
@@ -97,35 +91,19 @@ function summary({ counts, decisionDate }: RoundQuotesQuery['round']): string {
 
 function useFilters() {
   const [params, setParams] = useSearchParams();
-  const set = useCallback(
-    (name: string, value: string, replace = false) =>
-      setParams(
-        (before) => {
-          const next = new URLSearchParams(before);
-          next.delete('page');
-          if (value) next.set(name, value);
-          else next.delete(name);
-          return next;
-        },
-        { replace },
-      ),
-    [setParams],
-  );
+  const faultyOnly = params.get('only') === 'to-settle';
   return {
-    search: params.get('search') ?? '',
-    faultyOnly: params.get('only') === 'to-settle',
+    filtered: faultyOnly || params.has('q'),
+    faultyOnly,
     page: readPage(params),
-    // Typing on does not fill the history with every pause.
-    setSearch: useCallback((search: string) => set('search', search, true), [set]),
-    setFaultyOnly: (only: boolean) => set('only', only ? 'to-settle' : ''),
+    setFaultyOnly: (only: boolean) =>
+      setParams((before) => withFilter(before, 'only', only ? 'to-settle' : '')),
     clear: () => setParams({}),
   };
 }
 
 function NothingFound({ onClear }: { onClear: () => void }) {
-  return (
-    <Empty plain title="No quote matches" actions={<Button onClick={onClear}>Clear the filters</Button>} />
-  );
+  return <Empty plain title="No quote matches" actions={<Button onClick={onClear}>Clear filters</Button>} />;
 }
 
 function NoQuotes({ roundId }: { roundId: string }) {

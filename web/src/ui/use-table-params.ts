@@ -9,9 +9,8 @@ export function useTableParams(fallback: Sort) {
     sort,
     page: readPage(params),
     setSort: (next: Sort) =>
-      setParams((before) => withParam(before, 'sort', next.direction === 'desc' ? `-${next.id}` : next.id)),
-    /** Sets or, with an empty value, removes a filter; goes back to page 1. */
-    setFilter: (name: string, value: string) => setParams((before) => withParam(before, name, value)),
+      setParams((before) => withFilter(before, 'sort', next.direction === 'desc' ? `-${next.id}` : next.id)),
+    setFilter: (name: string, value: string) => setParams((before) => withFilter(before, name, value)),
   };
 }
 
@@ -28,7 +27,8 @@ export function readPage(params: URLSearchParams): number {
   return Number.isInteger(page) && page > 0 ? page : 1;
 }
 
-function withParam(before: URLSearchParams, name: string, value: string): URLSearchParams {
+/** The address with a filter set or, with an empty value, removed; goes back to page 1. */
+export function withFilter(before: URLSearchParams, name: string, value: string): URLSearchParams {
   const next = new URLSearchParams(before);
   next.delete('page');
   if (value) next.set(name, value);

@@ -1,12 +1,12 @@
 import { SegmentedControl } from '@primer/react';
 import { Link, useSearchParams } from 'react-router-dom';
 import styled from 'styled-components';
+import { SearchBox } from '../../ui/search-box';
 import { useNarrow } from '../../ui/use-media';
 import { useTableParams } from '../../ui/use-table-params';
 import { FIRST_SORT, VIEWS, isFiltered, viewOf, withoutFilters } from './candidate-list-params';
 import { FilterMenu } from './filter-menu';
 import type { Choice } from './filter-menu';
-import { SearchBox } from './search-box';
 
 interface CandidateToolbarProps {
   /** Candidates in each saved view. */
@@ -35,7 +35,7 @@ export function CandidateToolbar({ counts, departments, sites }: CandidateToolba
         ))}
       </SegmentedControl>
       <Filters>
-        <SearchBox />
+        <SearchBox label="Find a need" />
         <FilterMenu name="Department" param="department" choices={departments} />
         <FilterMenu name="Site" param="site" choices={sites} />
         {isFiltered(params) && <Link to={`?${withoutFilters(params)}`}>Clear filters</Link>}

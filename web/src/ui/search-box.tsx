@@ -1,12 +1,20 @@
 import { useEffect, useRef, useState } from 'react';
 import { TextInput } from '@primer/react';
 import { useSearchParams } from 'react-router-dom';
-import { Icon } from '../../ui/icon';
+import { Icon } from './icon';
+import { withFilter } from './use-table-params';
 
 const TYPING_MS = 250;
 
-/** Searches a moment after the last key; the words live in the address. */
-export function SearchBox() {
+interface SearchBoxProps {
+  /** What it finds, such as "Find a quote". */
+  label: string;
+  /** What to type, where the label does not say it. */
+  placeholder?: string;
+}
+
+/** Searches a moment after the last key; the words live in the address as `?q=`. */
+export function SearchBox({ label, placeholder = label }: SearchBoxProps) {
   const [params, setParams] = useSearchParams();
   const inAddress = params.get('q') ?? '';
   const [text, setText] = useState(inAddress);
@@ -34,25 +42,18 @@ export function SearchBox() {
   // Replaces the address, so that Back leaves the search and does not spell it backwards.
   function search(words: string) {
     setSent(words);
-    newestSetParams.current((before) => withSearch(before, words), { replace: true });
+    newestSetParams.current((before) => withFilter(before, 'q', words), { replace: true });
   }
 
   return (
     <TextInput
       type="search"
-      aria-label="Find a need"
-      placeholder="Find a need"
+      block
+      aria-label={label}
+      placeholder={placeholder}
       leadingVisual={() => <Icon name="search" />}
       value={text}
       onChange={(event) => change(event.target.value)}
     />
   );
-}
-
-function withSearch(before: URLSearchParams, words: string): URLSearchParams {
-  const next = new URLSearchParams(before);
-  next.delete('page');
-  if (words) next.set('q', words);
-  else next.delete('q');
-  return next;
 }
