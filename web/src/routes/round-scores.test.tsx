@@ -1,5 +1,5 @@
-import { screen, within } from '@testing-library/react';
-import { expect, test } from 'vitest';
+import { screen, waitFor, within } from '@testing-library/react';
+import { afterEach, expect, test, vi } from 'vitest';
 import { aRound, aViewer } from '../test/factories';
 import { fakeLink, refusal } from '../test/fake-link';
 import { renderRoute } from '../test/render-route';
@@ -70,6 +70,20 @@ function assessor(answers: Parameters<typeof fakeLink>[0] = {}) {
 const saves = (link: ReturnType<typeof fakeLink>) =>
   link.asked.filter(({ operation }) => operation === 'SaveScore').map(({ variables }) => variables.input);
 
+afterEach(() => void vi.restoreAllMocks());
+
+function onPhone() {
+  vi.spyOn(window, 'matchMedia').mockImplementation(
+    (media) =>
+      ({
+        matches: media.includes('max-width: 767px'),
+        media,
+        addEventListener() {},
+        removeEventListener() {},
+      }) as unknown as MediaQueryList,
+  );
+}
+
 test('scores by keyboard alone, saving when a cell is left', async () => {
   const link = assessor();
   const { user } = await renderRoute(PATH, link);
@@ -83,6 +97,26 @@ test('scores by keyboard alone, saving when a cell is left', async () => {
     { candidateId: 'c-1', criterionId: 'k-1', points: null, cannotJudge: true, reason: '' },
   ]);
   expect(screen.getByRole('heading', { level: 1 })).toHaveTextContent('You have given 3 of 4 scores');
+});
+
+test('takes score, reason and "cannot judge" on a phone', async () => {
+  onPhone();
+  const link = assessor();
+  const { user } = await renderRoute(PATH, link);
+  const safety = within(await screen.findByRole('group', { name: 'Patient safety' }));
+  expect(safety.getByLabelText('Patient safety')).toHaveAccessibleDescription(/nothing of Patient safety/u);
+  await user.type(safety.getByLabelText('Your reason'), 'Seen in use.');
+  await user.click(safety.getByLabelText('I cannot judge this'));
+  expect(safety.getByLabelText('Patient safety')).toHaveValue('');
+  await user.type(safety.getByLabelText('Patient safety'), '55');
+  await user.tab();
+  await waitFor(() => expect(safety.getByLabelText('I cannot judge this')).not.toBeChecked());
+  const cell = { candidateId: 'c-0', criterionId: 'k-0', reason: 'Seen in use.' };
+  expect(saves(link)).toEqual([
+    { ...cell, points: 40, cannotJudge: false },
+    { ...cell, points: null, cannotJudge: true },
+    { ...cell, points: 55, cannotJudge: false },
+  ]);
 });
 
 test('keeps nothing above 100 and says so', async () => {

@@ -11,7 +11,7 @@ import styled from 'styled-components';
 import { Icon } from './icon';
 import type { IconName } from './icon';
 
-export interface FieldProps {
+interface FieldProps {
   label: string;
   /** How to write it; the error takes its place. */
   help?: ReactNode;
@@ -22,14 +22,14 @@ export interface FieldProps {
 }
 
 /** What a control needs so that label, help and error belong to it. */
-export interface Wiring {
+interface Wiring {
   id: string;
   'aria-describedby'?: string;
   'aria-invalid'?: true;
 }
 
 /** Label above, control, help or error below. `children` gets the attributes that tie them together. */
-export function Field({
+function Field({
   label,
   help,
   error,
@@ -76,10 +76,16 @@ export function TextField({ label, help, error, labelAside, icon, unit, size, ..
           trailingVisual={unit}
           {...input}
           {...wiring}
+          aria-describedby={both(wiring['aria-describedby'], input['aria-describedby'])}
         />
       )}
     </Field>
   );
+}
+
+/** A field may be described by its own note and by something beside it. */
+function both(...ids: (string | undefined)[]): string | undefined {
+  return ids.filter(Boolean).join(' ') || undefined;
 }
 
 export function TextAreaField({

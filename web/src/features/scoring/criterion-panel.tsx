@@ -1,10 +1,9 @@
-import { useState } from 'react';
 import type { Ref } from 'react';
 import styled from 'styled-components';
 import { formatPercent } from '../../lib/money';
-import { TextAreaField } from '../../ui/field';
 import { Rod } from '../../ui/rod';
 import { Section } from '../../ui/section';
+import { ScoreReason } from './score-reason';
 import type { SheetCandidate, SheetCriterion } from './sheet-parts';
 import type { OwnScore } from './use-own-scores';
 
@@ -36,32 +35,8 @@ export function CriterionPanel({ candidate, criterion, score, onReason, reasonRe
         </ol>
         {score?.points != null && <You style={{ bottom: `${score.points}%` }}>{`You ${score.points}`}</You>}
       </Anchors>
-      <Reason key={`${candidate.id} ${criterion.id}`} {...{ score, onReason, reasonRef }} />
+      <ScoreReason key={`${candidate.id} ${criterion.id}`} {...{ score, onReason, reasonRef }} />
     </Section>
-  );
-}
-
-function Reason({
-  score,
-  onReason,
-  reasonRef,
-}: Pick<CriterionPanelProps, 'score' | 'onReason' | 'reasonRef'>) {
-  const [reason, setReason] = useState(score?.reason ?? '');
-  return (
-    <TextAreaField
-      ref={reasonRef}
-      label="Your reason"
-      help={
-        score
-          ? 'Shown to the other assessors once scoring has closed.'
-          : 'Give the score first, then its reason.'
-      }
-      value={reason}
-      maxLength={2000}
-      disabled={!score}
-      onChange={(event) => setReason(event.target.value)}
-      onBlur={() => score && reason !== score.reason && onReason(reason)}
-    />
   );
 }
 

@@ -4,6 +4,7 @@ import { formatPercent } from '../../lib/money';
 import { Button } from '../../ui/button';
 import { CheckboxField, TextField } from '../../ui/field';
 import { Section } from '../../ui/section';
+import { ScoreReason } from './score-reason';
 import type { SheetCandidate, SheetCriterion } from './sheet-parts';
 import type { OwnScores } from './use-own-scores';
 
@@ -56,21 +57,27 @@ function OneCriterion({ candidate, criterion, scores }: OneCriterionProps) {
   const [problem, setProblem] = useState<string>();
   const anchors = useId();
 
-  function save(points: number | null, cannotJudge: boolean) {
-    const reason = score?.reason ?? '';
+  function save(points: number | null, cannotJudge: boolean, reason = score?.reason ?? '') {
     void scores.save({ candidateId: candidate.id, criterionId: criterion.id, points, cannotJudge, reason });
   }
 
   function leave() {
-    if (text === (score?.points?.toString() ?? '')) return setProblem(undefined);
+    const kept = score?.points?.toString() ?? '';
+    if (text === kept) return setProblem(undefined);
     if (!/^\d{1,3}$/u.test(text) || Number(text) > 100)
       return setProblem('Write a whole number from 0 to 100.');
     setProblem(undefined);
     save(Number(text), false);
   }
 
+  function giveUp() {
+    setText('');
+    setProblem(undefined);
+    save(null, true);
+  }
+
   return (
-    <Criterion>
+    <Criterion role="group" aria-label={criterion.name}>
       <TextField
         label={criterion.name}
         labelAside={
@@ -78,7 +85,7 @@ function OneCriterion({ candidate, criterion, scores }: OneCriterionProps) {
         }
         inputMode="numeric"
         size="large"
-        value={score?.cannotJudge ? '' : text}
+        value={text}
         error={problem}
         aria-describedby={anchors}
         onChange={(event) => setText(event.target.value.trim())}
@@ -92,9 +99,13 @@ function OneCriterion({ candidate, criterion, scores }: OneCriterionProps) {
       </dl>
       <CheckboxField
         label="I cannot judge this"
+        help={score?.cannotJudge && 'Write a score above to take this back.'}
         checked={score?.cannotJudge ?? false}
-        onChange={(event) => event.target.checked && save(null, true)}
+        onChange={(event) => event.target.checked && giveUp()}
       />
+      {score && (
+        <ScoreReason score={score} onReason={(reason) => save(score.points, score.cannotJudge, reason)} />
+      )}
     </Criterion>
   );
 }
