@@ -95,3 +95,9 @@ test('leaves out the pages a role may not see', async () => {
   const nav = await screen.findByRole('navigation', { name: 'Main' });
   expect(within(nav).queryByRole('link', { name: /Candidates|Frontier|Approval/ })).not.toBeInTheDocument();
 });
+
+test('tells a member whose role has no page in the round whom to turn to', async () => {
+  await renderRoute('/', fakeLink({ Viewer: { viewer: aViewer({ roles: ['REQUESTER'] }) } }));
+  expect(await screen.findByRole('heading', { name: 'Your role has no page in this round' })).toBeVisible();
+  expect(screen.getByText('Round 2027 is under way.')).toBeVisible();
+});
