@@ -82,7 +82,7 @@ export function Component() {
       {!scoring && (
         <Two>
           <AssessorProgress assessors={assessors} />
-          <CriteriaList criteria={criteria} />
+          <CriteriaList criteria={criteria} frozen={round.stage !== 'GATHER'} />
         </Two>
       )}
     </Page>

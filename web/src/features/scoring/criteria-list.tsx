@@ -3,10 +3,20 @@ import { formatPercent } from '../../lib/money';
 import { Section } from '../../ui/section';
 import type { SheetCriterion } from './sheet-parts';
 
+interface CriteriaListProps {
+  criteria: readonly SheetCriterion[];
+  /** Once scoring has opened. */
+  frozen: boolean;
+}
+
 /** What is scored: each criterion with both anchors and its weight. */
-export function CriteriaList({ criteria }: { criteria: readonly SheetCriterion[] }) {
+export function CriteriaList({ criteria, frozen }: CriteriaListProps) {
   return (
-    <Section title="Criteria" aside="weights froze when scoring opened" padded>
+    <Section
+      title="Criteria"
+      aside={frozen ? 'weights froze when scoring opened' : 'weights freeze when scoring opens'}
+      padded
+    >
       <List>
         {criteria.map(({ id, name, weight, lowAnchor, highAnchor }) => (
           <li key={id}>

@@ -27,7 +27,7 @@ export function scoresAnswer({ round, assesses, given, of, assessors }: ScoresFa
   }
   if (round.stage !== 'SCORE') {
     return {
-      title: `Scored by ${assessors.length} assessors, ${formatNumber(all)} of ${formatNumber(wanted)} scores given`,
+      title: `Scored by ${assessors.length} ${assessors.length === 1 ? 'assessor' : 'assessors'}, ${formatNumber(all)} of ${formatNumber(wanted)} scores given`,
       sub: 'Scoring is closed. A missing score is left out of the mean of its criterion.',
     };
   }
