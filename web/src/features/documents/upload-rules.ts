@@ -6,7 +6,7 @@ const LARGEST_BYTES = 20 * 1024 * 1024;
 const ENDING = /[^.]\.(pdf|xlsx|csv|png|jpe?g)$/iu;
 
 /** Why a file need not even be sent; undefined when it may. The API looks again, at the content too. */
-export function refusalOf({ name, size }: Pick<File, 'name' | 'size'>): string | undefined {
+export function whyNotAccepted({ name, size }: Pick<File, 'name' | 'size'>): string | undefined {
   if (!ENDING.test(name)) return `“${name}” is of a type that is not accepted. ${ACCEPTED_FILES}`;
   if (size === 0) return `“${name}” is empty. ${ACCEPTED_FILES}`;
   if (size > LARGEST_BYTES) return `“${name}” has ${megabytes(size)}, which is too large. ${ACCEPTED_FILES}`;

@@ -1,7 +1,7 @@
 import { useEffect, useReducer, useRef } from 'react';
 import { errorMessage } from '../../lib/error-code';
 import { SendFailed } from './send-file';
-import { refusalOf } from './upload-rules';
+import { whyNotAccepted } from './upload-rules';
 import { Refused, useStoreDocument } from './use-store-document';
 
 export interface Upload {
@@ -53,7 +53,7 @@ export function useUploads(candidateId: string, onStored: (fileName: string) => 
     add: (files: Iterable<File>) => {
       for (const file of files) {
         const id = ++lastId.current;
-        const problem = refusalOf(file);
+        const problem = whyNotAccepted(file);
         if (problem) change({ id, file, sentBytes: 0, checking: false, problem, canRetry: false });
         else void send(id, file);
       }
