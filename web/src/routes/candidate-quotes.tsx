@@ -9,10 +9,11 @@ import { loadNeighbours } from '../features/quotes/candidate-order';
 import type { Neighbours } from '../features/quotes/candidate-order';
 import { KEPT_QUOTE } from '../features/quotes/kept-quote';
 import { QUOTE_FIGURES } from '../features/quotes/quote-figures';
-import { client, preloadQuery } from '../lib/apollo';
+import { preloadQuery } from '../lib/apollo';
+import { canChangeContents } from '../lib/can-change-contents';
 import { paths } from '../lib/paths';
-import { stepIndex } from '../lib/round-stage';
 import { useCan } from '../lib/use-can';
+import { useReload } from '../lib/use-reload';
 import { Button, ButtonLink } from '../ui/button';
 import { Notice } from '../ui/notice';
 import { Page, PageHeader } from '../ui/page';
@@ -80,9 +81,10 @@ export function Component() {
   const { data } = useReadQuery(queryRef);
   const dialog = useQuoteDialog();
   const can = useCan();
+  const reload = useReload();
   const { candidate, round } = data;
   const { code, name, department, site, quotes } = candidate;
-  const frozen = stepIndex(round.stage) >= stepIndex('DECIDE');
+  const frozen = !canChangeContents(round.stage);
   const mayEnter = can('createQuote') && !frozen;
   return (
     <Page>
@@ -112,7 +114,7 @@ export function Component() {
         dialog={dialog}
         mayEnter={mayEnter}
         frozen={frozen}
-        onStored={() => client.refetchQueries({ include: 'active' })}
+        onStored={() => void reload()}
       />
     </Page>
   );

@@ -1,5 +1,6 @@
 import type { QuoteFieldsInput } from '../../generated/graphql';
 import type { FieldProblems } from '../../lib/refusal';
+import { typedText } from '../../lib/typed-text';
 import { QUOTE_LABELS } from './quote-figures';
 import type { QuoteFieldName } from './quote-figures';
 
@@ -12,7 +13,7 @@ const COUNTS = { quantity: 1, warrantyYears: 0, leadWeeks: 0 } as const;
 
 /** What was typed, or how to write right what is missing or unreadable. The API judges the rest. */
 export function readQuoteForm(data: FormData): { fields: Fields } | { problems: FieldProblems } {
-  const text = (name: QuoteFieldName) => textOf(data.get(name));
+  const text = (name: QuoteFieldName) => typedText(data, name);
   const problems = problemsIn(text);
   if (Object.keys(problems).length > 0) return { problems };
   return {
@@ -38,10 +39,6 @@ export function readQuoteForm(data: FormData): { fields: Fields } | { problems: 
       paymentTerms: text('paymentTerms'),
     },
   };
-}
-
-function textOf(entry: FormDataEntryValue | null): string {
-  return typeof entry === 'string' ? entry.trim() : '';
 }
 
 function problemsIn(text: (name: QuoteFieldName) => string): FieldProblems {

@@ -1,7 +1,8 @@
 import { gql } from '@apollo/client';
 import type { TypedDocumentNode } from '@apollo/client';
-import { useApolloClient, useMutation } from '@apollo/client/react';
+import { useMutation } from '@apollo/client/react';
 import { refusalOf } from '../../lib/refusal';
+import { useReload } from '../../lib/use-reload';
 import type { KeepQuoteMutation, KeepQuoteMutationVariables } from './use-keep-quote.generated';
 
 const KEEP_QUOTE: TypedDocumentNode<KeepQuoteMutation, KeepQuoteMutationVariables> = gql`
@@ -21,7 +22,7 @@ const KEEP_QUOTE: TypedDocumentNode<KeepQuoteMutation, KeepQuoteMutationVariable
 
 /** Keeps a quote, or with `quoteId` null goes back to the round's rule. Gives the refusal's words, nothing when it is done. */
 export function useKeepQuote(candidate: { id: string; version: number }) {
-  const client = useApolloClient();
+  const reload = useReload();
   const [keepQuote, { loading }] = useMutation(KEEP_QUOTE, {
     refetchQueries: 'active',
     awaitRefetchQueries: true,
@@ -33,7 +34,7 @@ export function useKeepQuote(candidate: { id: string; version: number }) {
       return data?.keepQuote.__typename === 'QuoteNotUsable' ? data.keepQuote.message : undefined;
     } catch (error) {
       const refusal = refusalOf(error, { reason: 'The reason' });
-      if (refusal.kind === 'conflict') await client.refetchQueries({ include: 'active' });
+      if (refusal.kind === 'conflict') await reload();
       return refusal.kind === 'fields' ? Object.values(refusal.problems)[0] : refusal.message;
     }
   }

@@ -1,7 +1,7 @@
-import { useApolloClient } from '@apollo/client/react';
 import { useState } from 'react';
 import { refusalOf } from '../../lib/refusal';
 import type { FieldProblems } from '../../lib/refusal';
+import { useReload } from '../../lib/use-reload';
 import { QUOTE_LABELS } from './quote-figures';
 import type { QuoteFigures } from './quote-figures';
 import { readQuoteForm } from './read-quote-form';
@@ -28,7 +28,7 @@ export function useQuoteForm(
   { candidateId, quote, documentId }: Target,
   onSaved: (saved: SavedQuote) => void,
 ) {
-  const client = useApolloClient();
+  const reload = useReload();
   const { create, update, loading } = useSaveQuote();
   const [base, setBase] = useState(quote);
   const [refused, setRefused] = useState<Refused>(NONE);
@@ -56,7 +56,7 @@ export function useQuoteForm(
       problems: {},
       message: 'Somebody else has changed this quote. Nothing of yours is saved yet.',
     });
-    await client.refetchQueries({ include: 'active' });
+    await reload();
     setConflict(true);
   }
 
