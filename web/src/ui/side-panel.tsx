@@ -40,7 +40,6 @@ export function SidePanel({ title, over, onClose, footer, width = 308, children 
 }
 
 function Beside({ title, over, onClose, footer, width, children }: SidePanelProps) {
-  const panel = useRef<HTMLElement>(null);
   const cameFrom = useRef<Element | null>(null);
   useEffect(() => {
     cameFrom.current = document.activeElement;
@@ -50,7 +49,7 @@ function Beside({ title, over, onClose, footer, width, children }: SidePanelProp
     if (event.key === 'Escape' && !event.defaultPrevented) onClose();
   }
   return (
-    <Aside ref={panel} aria-label={title} onKeyDown={keyDown} style={{ width }} data-screen-only>
+    <Aside aria-label={title} onKeyDown={keyDown} style={{ width }} data-screen-only>
       <Top>
         <div>
           {over && <p className="muted small">{over}</p>}

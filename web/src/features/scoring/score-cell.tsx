@@ -9,7 +9,6 @@ interface ScoreCellProps {
   /** The one cell of the grid in the tab order. */
   current: boolean;
   label: string;
-  readOnly: boolean;
   onKeyDown: (event: KeyboardEvent) => void;
   onFocus: () => void;
   onBlur: (event: FocusEvent) => void;
@@ -17,14 +16,13 @@ interface ScoreCellProps {
 }
 
 /** One score on the sheet: the points, "cannot judge", or an empty place to type into. */
-export function ScoreCell({ score, draft, current, label, readOnly, ...handlers }: ScoreCellProps) {
+export function ScoreCell({ score, draft, current, label, ...handlers }: ScoreCellProps) {
   const text = draft ?? wordsOf(score);
   return (
     <Cell
       role="gridcell"
       tabIndex={current ? 0 : -1}
       aria-label={`${label}: ${text || 'no score'}`}
-      aria-readonly={readOnly}
       data-failed={score?.state === 'failed' || undefined}
       {...handlers}
     >

@@ -104,7 +104,6 @@ export function ScoreGrid({
                     draft={here ? draft : undefined}
                     current={here}
                     label={`${candidate.name}, ${criterion.name}`}
-                    readOnly={false}
                     onKeyDown={keyDown}
                     onFocus={() => onMove({ row, column })}
                     onBlur={commit}

@@ -25,7 +25,6 @@ export const SELECTION_MEMO: TypedDocumentNode<SelectionMemoFragment> = gql`
     memo {
       roundName
       runNumber
-      costAxis
       certificateStatus
       benefit
       capital {

@@ -1,4 +1,4 @@
-import type { CertificateStatus, CostAxis, SelectionState } from '../../generated/graphql';
+import type { CertificateStatus, SelectionState } from '../../generated/graphql';
 import type { TagTone } from '../../ui/tag';
 
 export const DECISION_WORDS: Record<SelectionState, string> = {
@@ -13,11 +13,6 @@ export const STATE_TONES: Record<SelectionState, TagTone> = {
   APPROVED: 'good',
   RETURNED: 'plain',
   DECLINED: 'bad',
-};
-
-export const COST_AXIS_WORDS: Record<CostAxis, string> = {
-  CAPITAL: 'capital',
-  LIFE_CYCLE: 'life-cycle cost',
 };
 
 /** How sure the search is that nothing better exists at this cost. */
