@@ -12,7 +12,7 @@ interface LatestFeedProps {
 /** The newest entries of the trail. */
 export function LatestFeed({ entries, onOpenAll }: LatestFeedProps) {
   return (
-    <Tall title="Latest" aside={<AllActivity onClick={onOpenAll}>All activity</AllActivity>} padded>
+    <Tall title="Latest" aside={<OpenAll onClick={onOpenAll}>All activity</OpenAll>} padded>
       {entries.length === 0 ? (
         <p className="muted">What happens in this round is written down here.</p>
       ) : (
@@ -26,7 +26,7 @@ const Tall = styled(Section)`
   height: 100%;
 `;
 
-const AllActivity = styled(Button).attrs({ variant: 'quiet', size: 'small' })`
+const OpenAll = styled(Button).attrs({ variant: 'quiet', size: 'small' })`
   margin: -4px -8px;
   text-decoration: underline;
 `;

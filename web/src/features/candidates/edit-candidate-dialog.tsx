@@ -79,7 +79,7 @@ function Conflict({ changed, onTakeTheirs, onKeepMine }: ConflictProps) {
       title="Somebody else saved this candidate meanwhile"
       actions={
         <>
-          <Button onClick={onTakeTheirs}>Load theirs</Button>
+          <Button onClick={onTakeTheirs}>Take theirs</Button>
           <Button onClick={onKeepMine}>Go on with mine</Button>
         </>
       }
