@@ -1,5 +1,5 @@
 /** How the clinic group writes numbers and dates. Set once the viewer is known, read by money.ts and dates.ts. */
-export interface Conventions {
+interface Conventions {
   /** BCP 47, such as "de-DE": decides decimal sign and the place of the currency. Texts stay English. */
   locale: string;
   /** IANA zone that the group's calendar dates are counted in. */

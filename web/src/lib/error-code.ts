@@ -1,7 +1,7 @@
 import { CombinedGraphQLErrors } from '@apollo/client';
 
 /** What the API says about a refused request, or what we know when no answer came. */
-export type ErrorCode =
+type ErrorCode =
   | 'UNAUTHENTICATED'
   | 'FORBIDDEN'
   | 'NOT_FOUND'

@@ -1,6 +1,6 @@
 import { conventions } from './conventions';
 
-export type ReadAmount = { amount: string } | { problem: string };
+type ReadAmount = { amount: string } | { problem: string };
 
 /**
  * Reads what a person typed as money: "1 234,56", "1.234,56", "1,234.56", "1234". Gives plain decimal text.

@@ -4,7 +4,7 @@ import { errorCode, errorMessage, fieldErrors } from './error-code';
 export type FieldProblems = Record<string, string>;
 
 /** Why something was not saved: fields to mend, somebody else's save that came first, or a sentence. */
-export type Refusal =
+type Refusal =
   | { kind: 'fields'; problems: FieldProblems }
   | { kind: 'conflict'; message: string }
   | { kind: 'message'; message: string };

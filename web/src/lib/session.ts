@@ -1,8 +1,8 @@
 import { errorCode } from './error-code';
 
-export type SessionEnd = 'expired' | 'signed-out';
+type SessionEnd = 'expired' | 'signed-out';
 
-export interface Session {
+interface Session {
   /** The access token, kept in memory only; undefined before the first renewal and after the end. */
   token(): string | undefined;
   start(accessToken: string): void;

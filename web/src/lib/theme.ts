@@ -6,7 +6,7 @@ export type Theme = 'auto' | 'light' | 'dark';
 const KEY = 'metewand.theme';
 const listeners = new Set<() => void>();
 
-export function currentTheme(): Theme {
+function currentTheme(): Theme {
   const mode = document.documentElement.dataset.colorMode;
   return mode === 'light' || mode === 'dark' ? mode : 'auto';
 }

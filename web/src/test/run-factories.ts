@@ -6,11 +6,11 @@ function eur(amount: string) {
   return { __typename: 'Money' as const, amount, currency: 'EUR' };
 }
 
-export function aPoint(cost: string, benefit: string, picks: number[], capital = cost): Point {
+function aPoint(cost: string, benefit: string, picks: number[], capital = cost): Point {
   return { __typename: 'RunPoint', benefit, picks, cost: eur(cost), capital: eur(capital) };
 }
 
-export function aRunItem(code: string, name: string, mandatory = false): RunFieldsFragment['items'][number] {
+function aRunItem(code: string, name: string, mandatory = false): RunFieldsFragment['items'][number] {
   return {
     __typename: 'RunItem',
     candidateId: code,

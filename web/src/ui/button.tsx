@@ -16,7 +16,7 @@ interface Look {
   block?: boolean;
 }
 
-export type ButtonProps = Look &
+type ButtonProps = Look &
   ButtonHTMLAttributes<HTMLButtonElement> & {
     /** Shows a spinner and takes no second press. */
     loading?: boolean;

@@ -20,7 +20,7 @@ export function Person({ name }: { name: string }) {
 }
 
 /** "Dr Ruben Adeyi" → "RA": titles are no part of a name. */
-export function initialsOf(name: string): string {
+function initialsOf(name: string): string {
   const words = name.split(/\s+/u).filter((word) => word && !/^(Dr|Prof|Mr|Mrs|Ms)\.?$/iu.test(word));
   return [words[0], words.length > 1 ? words.at(-1) : undefined]
     .map((word) => [...(word ?? '')][0] ?? '')

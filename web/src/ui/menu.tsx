@@ -5,7 +5,7 @@ import type { ReactNode, Ref } from 'react';
 const load = () => import('./menu-overlay');
 const MenuOverlay = lazy(async () => ({ default: (await load()).MenuOverlay }));
 
-export interface MenuItem {
+interface MenuItem {
   id: string;
   name: string;
   /** Second, quiet line. */
@@ -21,7 +21,7 @@ export interface MenuGroup {
   items: readonly MenuItem[];
 }
 
-export interface MenuAnchor {
+interface MenuAnchor {
   id: string;
   ref: Ref<HTMLButtonElement>;
   type: 'button';

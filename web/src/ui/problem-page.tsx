@@ -3,7 +3,7 @@ import styled from 'styled-components';
 import { Icon } from './icon';
 import { Page } from './page';
 
-export interface WayOut {
+interface WayOut {
   title: string;
   note?: string;
   /** A button or a link that looks like one. */

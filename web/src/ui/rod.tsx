@@ -1,7 +1,7 @@
 import type { CSSProperties } from 'react';
 import styled, { css } from 'styled-components';
 
-export interface RodProps {
+interface RodProps {
   orientation?: 'horizontal' | 'vertical';
   /** Across the rod, px. The rod fills its container along its length. */
   thickness?: number;

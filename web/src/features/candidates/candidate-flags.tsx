@@ -5,7 +5,7 @@ import type { TagTone } from '../../ui/tag';
 import type { IconName } from '../../ui/icon';
 import type { CandidateRowFragment } from './candidate-row.generated';
 
-export interface Flag {
+interface Flag {
   words: string;
   tone: TagTone;
   icon: IconName;

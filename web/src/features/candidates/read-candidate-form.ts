@@ -3,7 +3,7 @@ import { readAmount } from '../../lib/read-amount';
 import type { FieldProblems } from '../../lib/refusal';
 import { typedText } from '../../lib/typed-text';
 
-export interface ReadCandidate {
+interface ReadCandidate {
   fields: CandidateFieldsInput;
   /** Only what could not be read at all; whether figures are allowed is for the API to say. */
   problems: FieldProblems;

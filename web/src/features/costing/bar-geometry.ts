@@ -1,6 +1,6 @@
 import type { CostLineId } from './cost-lines';
 
-export interface LineValue {
+interface LineValue {
   id: CostLineId;
   /** Present value in major units. */
   value: number;

@@ -10,7 +10,7 @@ export interface Figure {
   lowest: boolean;
 }
 
-export interface LineRow {
+interface LineRow {
   line: CostLine;
   /** One per quote, in their order. */
   figures: Figure[];

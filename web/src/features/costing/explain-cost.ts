@@ -13,7 +13,7 @@ export interface Explanation {
   inputs: (quote: ComparedQuote) => Input[];
 }
 
-export interface Input {
+interface Input {
   name: string;
   value: string;
 }

@@ -1,5 +1,5 @@
 /** Where to post a file, and what to post before it. */
-export interface Slot {
+interface Slot {
   url: string;
   fields: readonly { name: string; value: string }[];
 }

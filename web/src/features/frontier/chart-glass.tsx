@@ -10,7 +10,7 @@ import { PEG_GAP, thinPegs } from './thin-pegs';
 import { points } from './wording';
 
 /** How many times larger the glass shows what lies around A. */
-export const GLASS_POWER = 5;
+const GLASS_POWER = 5;
 
 interface ChartGlassProps {
   geometry: Geometry;
@@ -81,7 +81,7 @@ export function ChartGlass({ geometry, glass, portfolios, selected, bound, atMos
 }
 
 /** The part of the plot that the glass shows, in its unenlarged size: A stands in the middle. */
-export function seenThrough(glass: Box, { x, y }: Geometry, { cost, benefit }: Portfolio): Box {
+function seenThrough(glass: Box, { x, y }: Geometry, { cost, benefit }: Portfolio): Box {
   const width = glass.width / GLASS_POWER;
   const height = glass.height / GLASS_POWER;
   return { x: x(cost) - width / 2, y: y(benefit) - height * 0.56, width, height };

@@ -8,7 +8,7 @@ interface Mark {
   text: string;
 }
 
-export interface LayoutInput {
+interface LayoutInput {
   geometry: Geometry;
   /** The kept portfolios in px, in order of cost. */
   line: readonly (readonly [x: number, y: number])[];

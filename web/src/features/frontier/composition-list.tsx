@@ -84,7 +84,7 @@ function ItemRow({ item, share, inA }: { item: Item; share: number; inA: boolean
 }
 
 /** "all", "96 %", "none"; a share is never rounded to either end. */
-export function shareText(share: number): string {
+function shareText(share: number): string {
   if (share === 1) return 'all';
   if (share === 0) return 'none';
   if (share > 0.995) return `> ${formatPercent(0.99)}`;

@@ -12,7 +12,7 @@ interface Standing {
   certificate: { status: CertificateStatus; gapPercent?: number | null };
 }
 
-export interface StateTag {
+interface StateTag {
   text: string;
   tone: TagTone;
   icon: IconName;

@@ -41,7 +41,7 @@ export function SendForApproval({ run, front, selected, roundId }: SendForApprov
 }
 
 /** Why a portfolio cannot be sent now; undefined when it can. */
-export function obstacleOf({ state }: Pick<Run, 'state'>, { aboveCeiling }: Portfolio): string | undefined {
+function obstacleOf({ state }: Pick<Run, 'state'>, { aboveCeiling }: Portfolio): string | undefined {
   if (isActive(state)) return 'A can be sent once the search has ended. Stop and keep it to go on now.';
   if (aboveCeiling)
     return 'The capital of A lies above the ceiling. Choose a portfolio up to it, or raise the ceiling.';

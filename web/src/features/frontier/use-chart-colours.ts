@@ -2,7 +2,7 @@ import { useMemo } from 'react';
 import { useTheme } from '../../lib/theme';
 import { useMedia } from '../../ui/use-media';
 
-export interface ChartColours {
+interface ChartColours {
   lookedAt: string;
   onceKept: string;
   grid: string;

@@ -15,7 +15,7 @@ import type {
 
 const POLL_MS = 1_000;
 
-export const RUN: TypedDocumentNode<RunQuery, RunQueryVariables> = gql`
+const RUN: TypedDocumentNode<RunQuery, RunQueryVariables> = gql`
   query Run($id: ID!) {
     run(id: $id) {
       ...RunFields

@@ -15,7 +15,7 @@ const CANDIDATE_ORDER: TypedDocumentNode<CandidateOrderQuery, CandidateOrderQuer
   }
 `;
 
-export type Neighbour = CandidateOrderQuery['candidates']['items'][number];
+type Neighbour = CandidateOrderQuery['candidates']['items'][number];
 
 export interface Neighbours {
   previous?: Neighbour;

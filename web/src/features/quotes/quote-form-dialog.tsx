@@ -11,7 +11,7 @@ import { QuoteFormFields } from './quote-form-fields';
 import { useQuoteForm } from './use-quote-form';
 import type { SavedQuote } from './use-save-quote';
 
-export interface QuoteFormDialogProps {
+interface QuoteFormDialogProps {
   candidate: { id: string; name: string; quantity: number };
   /** The quote to change; undefined for a new one. */
   quote?: QuoteFigures;

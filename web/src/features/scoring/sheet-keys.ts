@@ -4,7 +4,7 @@ export interface Place {
   column: number;
 }
 
-export type SheetAction =
+type SheetAction =
   | { kind: 'move'; to: Place }
   | { kind: 'type'; digit: string }
   | { kind: 'erase' }

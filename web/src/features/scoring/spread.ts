@@ -1,7 +1,7 @@
 import type { SheetScore } from './sheet-parts';
 
 /** How all assessors scored one candidate on one criterion. */
-export interface Spread {
+interface Spread {
   mean: number;
   lowest: number;
   highest: number;
@@ -9,7 +9,7 @@ export interface Spread {
   wide: boolean;
 }
 
-export const WIDE_SPREAD_POINTS = 30;
+const WIDE_SPREAD_POINTS = 30;
 
 /** Undefined when nobody gave points. */
 export function spreadOf(scores: readonly SheetScore[]): Spread | undefined {
