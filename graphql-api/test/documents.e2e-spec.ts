@@ -213,6 +213,17 @@ describe('an upload', () => {
     expect((await coordinator.ask(FINISH, { id })).errors?.[0].extensions.code).toBe('NOT_FOUND');
   });
 
+  it('is kept once, however often it is finished at the same time', async () => {
+    const slot = await start('C04', 'offer.pdf', 'application/pdf', PDF.length);
+    await send(slot, PDF);
+    const { id } = slot.document;
+    const answers = await Promise.all(Array.from({ length: 8 }, () => finish(id)));
+    expect(answers.map(({ __typename, state }) => [__typename, state])).toEqual(
+      answers.map(() => ['Document', 'READY']),
+    );
+    expect(await statusOf(`documents/${id}`)).toBe(200);
+  });
+
   it('is refused when nothing was sent', async () => {
     const { document } = await start('C04', 'offer.pdf', 'application/pdf', 10);
     expect(await finish(document.id)).toEqual({

@@ -1,4 +1,4 @@
-import { Injectable } from '@nestjs/common';
+import { Injectable, Logger } from '@nestjs/common';
 import { AuditService } from '../audit/audit.service.js';
 import { CandidatesService } from '../candidates/candidates.service.js';
 import { documentKey, slotKey } from '../storage/storage-keys.js';
@@ -17,6 +17,8 @@ type Inspection = { sha256: string } | { refusal: string };
 /** An upload goes from the browser straight to a slot of the store; here it is announced, then checked and kept. */
 @Injectable()
 export class UploadsService {
+  private readonly log = new Logger('Uploads');
+
   constructor(
     private readonly db: TenantDatabase,
     private readonly candidates: CandidatesService,
@@ -42,7 +44,7 @@ export class UploadsService {
     const inspection = await this.takeOver(document);
     if ('refusal' in inspection) return this.refuse(document, inspection.refusal);
     const kept = await this.markReady(document, inspection.sha256);
-    await this.storage.delete(slotKey(documentId));
+    await this.emptySlot(documentId);
     return kept;
   }
 
@@ -69,7 +71,8 @@ export class UploadsService {
     const arrived = await this.storage.sizeOf(slotKey(id));
     if (arrived === null) return { refusal: nothingArrived(fileName) };
     if (arrived !== sizeBytes || arrived > LARGEST_FILE_BYTES) return { refusal: wrongSize(fileName) };
-    await this.storage.copy(slotKey(id), documentKey(id));
+    const isCopied = await this.storage.copy(slotKey(id), documentKey(id));
+    if (!isCopied) return { refusal: nothingArrived(fileName) };
     const copied = await this.storage.sizeOf(documentKey(id));
     if (copied !== sizeBytes) return { refusal: wrongSize(fileName) };
     const bytes = await this.storage.read(documentKey(id));
@@ -92,9 +95,23 @@ export class UploadsService {
     });
   }
 
-  /** The row goes first: an object without a row cannot be reached, a row without an object would be a promise. */
-  private async refuse({ id }: Document, refusal: string): Promise<UploadRefused> {
-    await this.db.transaction((em) => em.delete(Document, { id, state: DocumentState.EXPECTED }));
+  /** What is kept stays kept, even if the store no longer answers. */
+  private async emptySlot(documentId: string): Promise<void> {
+    await this.storage
+      .delete(slotKey(documentId))
+      .catch(() => this.log.warn(`the slot of document ${documentId} could not be emptied`));
+  }
+
+  /**
+   * The row goes first: an object without a row cannot be reached, a row without an object would be a promise. Without
+   * a row to remove, the same upload was finished meanwhile by another request, and its answer stands.
+   */
+  private async refuse({ id }: Document, refusal: string): Promise<Document | UploadRefused> {
+    const finished = await this.db.transaction(async (em) => {
+      const { affected } = await em.delete(Document, { id, state: DocumentState.EXPECTED });
+      return affected ? null : findOrThrow(em, Document, 'document', id);
+    });
+    if (finished) return finished;
     await this.storage.delete(slotKey(id));
     await this.storage.delete(documentKey(id));
     return new UploadRefused(refusal);

@@ -4,6 +4,7 @@ import {
   DeleteObjectCommand,
   GetObjectCommand,
   HeadObjectCommand,
+  NoSuchKey,
   NotFound,
   S3Client,
 } from '@aws-sdk/client-s3';
@@ -87,9 +88,18 @@ export class StorageService {
     });
   }
 
-  async copy(from: string, to: string): Promise<void> {
+  /** Whether there was anything to copy. */
+  copy(from: string, to: string): Promise<boolean> {
     const command = new CopyObjectCommand({ ...this.at(to), CopySource: `${this.bucket}/${from}` });
-    await orUnavailable(() => this.client.send(command, patience()));
+    return orUnavailable(async () => {
+      try {
+        await this.client.send(command, patience());
+        return true;
+      } catch (error) {
+        if (error instanceof NoSuchKey) return false;
+        throw error;
+      }
+    });
   }
 
   /** Deleting what is not there is no error. */
