@@ -1,7 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { In } from 'typeorm';
-import { NotFoundError } from '../common/domain-error.js';
-import { RequestLoader } from '../common/request-loader.js';
+import { inOrderOf, RequestLoader } from '../common/request-loader.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
 import { Candidate } from './entities/candidate.entity.js';
 
@@ -13,7 +12,6 @@ export class CandidatesByIdLoader extends RequestLoader<string, Candidate> {
 
   protected async batch(ids: readonly string[]) {
     const rows = await this.db.transaction((em) => em.findBy(Candidate, { id: In([...ids]) }));
-    const byId = new Map(rows.map((row) => [row.id, row]));
-    return ids.map((id) => byId.get(id) ?? new NotFoundError('candidate', id));
+    return inOrderOf(ids, rows, 'candidate');
   }
 }

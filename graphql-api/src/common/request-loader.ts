@@ -1,5 +1,6 @@
 import DataLoader from 'dataloader';
 import { requestScope } from '../tenancy/request-context.js';
+import { NotFoundError } from './domain-error.js';
 
 /**
  * A DataLoader made once per request from a singleton. Loaders serve resolvers; services do not call them,
@@ -22,6 +23,16 @@ export abstract class RequestLoader<K, V> {
     scope.loaders.set(this.key, made);
     return made;
   }
+}
+
+/** Puts rows in the order of the ids; an id without a row is NOT_FOUND. */
+export function inOrderOf<R extends { id: string }>(
+  ids: readonly string[],
+  rows: readonly R[],
+  what: string,
+): (R | NotFoundError)[] {
+  const byId = new Map(rows.map((row) => [row.id, row]));
+  return ids.map((id) => byId.get(id) ?? new NotFoundError(what, id));
 }
 
 /** Puts rows in the order of the keys, several rows a key. */

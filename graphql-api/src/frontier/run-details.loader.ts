@@ -1,7 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { In } from 'typeorm';
-import { NotFoundError } from '../common/domain-error.js';
-import { RequestLoader } from '../common/request-loader.js';
+import { inOrderOf, RequestLoader } from '../common/request-loader.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
 import { Run } from './entities/run.entity.js';
 
@@ -21,6 +20,6 @@ export class RunDetailsLoader extends RequestLoader<string, RunDetails> {
         select: { id: true, items: true, progress: true, result: true },
       }),
     );
-    return ids.map((id) => rows.find((row) => row.id === id) ?? new NotFoundError('run', id));
+    return inOrderOf(ids, rows, 'run');
   }
 }

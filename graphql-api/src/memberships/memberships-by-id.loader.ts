@@ -1,7 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { In } from 'typeorm';
-import { NotFoundError } from '../common/domain-error.js';
-import { RequestLoader } from '../common/request-loader.js';
+import { inOrderOf, RequestLoader } from '../common/request-loader.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
 import { Membership } from './entities/membership.entity.js';
 
@@ -13,6 +12,6 @@ export class MembershipsByIdLoader extends RequestLoader<string, Membership> {
 
   protected async batch(ids: readonly string[]) {
     const rows = await this.db.transaction((em) => em.findBy(Membership, { id: In([...ids]) }));
-    return ids.map((id) => rows.find((row) => row.id === id) ?? new NotFoundError('membership', id));
+    return inOrderOf(ids, rows, 'membership');
   }
 }

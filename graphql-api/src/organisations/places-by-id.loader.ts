@@ -1,7 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { In } from 'typeorm';
-import { NotFoundError } from '../common/domain-error.js';
-import { RequestLoader } from '../common/request-loader.js';
+import { inOrderOf, RequestLoader } from '../common/request-loader.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
 import { Department } from './entities/department.entity.js';
 import { Site } from './entities/site.entity.js';
@@ -14,7 +13,7 @@ export class SitesByIdLoader extends RequestLoader<string, Site> {
 
   protected async batch(ids: readonly string[]) {
     const rows = await this.db.transaction((em) => em.findBy(Site, { id: In([...ids]) }));
-    return ids.map((id) => rows.find((row) => row.id === id) ?? new NotFoundError('site', id));
+    return inOrderOf(ids, rows, 'site');
   }
 }
 
@@ -26,6 +25,6 @@ export class DepartmentsByIdLoader extends RequestLoader<string, Department> {
 
   protected async batch(ids: readonly string[]) {
     const rows = await this.db.transaction((em) => em.findBy(Department, { id: In([...ids]) }));
-    return ids.map((id) => rows.find((row) => row.id === id) ?? new NotFoundError('department', id));
+    return inOrderOf(ids, rows, 'department');
   }
 }

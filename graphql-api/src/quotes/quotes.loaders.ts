@@ -1,7 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { In } from 'typeorm';
-import { NotFoundError } from '../common/domain-error.js';
-import { groupByKey, RequestLoader } from '../common/request-loader.js';
+import { groupByKey, inOrderOf, RequestLoader } from '../common/request-loader.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
 import { Quote } from './entities/quote.entity.js';
 import { Vendor } from './entities/vendor.entity.js';
@@ -29,7 +28,6 @@ export class VendorsByIdLoader extends RequestLoader<string, Vendor> {
 
   protected async batch(ids: readonly string[]) {
     const rows = await this.db.transaction((em) => em.findBy(Vendor, { id: In([...ids]) }));
-    const byId = new Map(rows.map((row) => [row.id, row]));
-    return ids.map((id) => byId.get(id) ?? new NotFoundError('vendor', id));
+    return inOrderOf(ids, rows, 'vendor');
   }
 }
