@@ -1,7 +1,13 @@
 import { Injectable } from '@nestjs/common';
 import { CandidateBenefits } from '../candidates/candidate-benefits.js';
 import { toMoneyModel } from '../common/models/money.model.js';
-import { RoundCostsService, type PricedCandidate, type RoundCosts } from '../costing/round-costs.service.js';
+import { namesById } from '../common/names-by-id.js';
+import {
+  capitalOf,
+  RoundCostsService,
+  type PricedCandidate,
+  type RoundCosts,
+} from '../costing/round-costs.service.js';
 import { OrganisationsService } from '../organisations/organisations.service.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
 import {
@@ -39,7 +45,7 @@ export class CandidateTableService {
         all: rows.length,
         somethingMissing: rows.filter((row) => inView(row, CandidateView.SOMETHING_MISSING)).length,
         mandatory: rows.filter((row) => inView(row, CandidateView.MANDATORY)).length,
-        askedFor: toMoneyModel(askedForMinor(costs), costs.currency),
+        askedFor: toMoneyModel(capitalOf(costs.priced), costs.currency),
       };
     });
   }
@@ -64,12 +70,4 @@ export class CandidateTableService {
       };
     });
   }
-}
-
-function askedForMinor({ priced }: RoundCosts): number {
-  return priced.reduce((sum, { capitalMinor }) => sum + capitalMinor, 0);
-}
-
-function namesById(places: readonly { id: string; name: string }[]): Map<string, string> {
-  return new Map(places.map(({ id, name }) => [id, name]));
 }

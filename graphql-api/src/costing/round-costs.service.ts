@@ -63,6 +63,11 @@ export class RoundCostsService {
   }
 }
 
+/** What these are bought for together, in minor units. */
+export function capitalOf(priced: readonly { capitalMinor: number }[]): number {
+  return priced.reduce((sum, { capitalMinor }) => sum + capitalMinor, 0);
+}
+
 function priced({ candidate, quotes, inForce }: CostedCandidate): PricedCandidate | null {
   if (!inForce) return null;
   const { quote, cost } = inForce.judged;

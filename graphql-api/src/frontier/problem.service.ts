@@ -3,6 +3,7 @@ import { In, type EntityManager } from 'typeorm';
 import { parseProblem, ProblemError, type Problem, type WriteFigure } from '@metewand/frontier';
 import { LinksService } from '../candidates/links.service.js';
 import type { Candidate } from '../candidates/entities/candidate.entity.js';
+import { namesById } from '../common/names-by-id.js';
 import { RoundCostsService, type PricedCandidate, type RoundCosts } from '../costing/round-costs.service.js';
 import { measured } from '../limits/limit-measures.js';
 import { LimitsService } from '../limits/limits.service.js';
@@ -80,9 +81,9 @@ export class ProblemService {
   private async names(em: EntityManager, { priced }: RoundCosts): Promise<Names> {
     const vendorIds = priced.map(({ quote }) => quote.vendorId);
     return {
-      sites: nameById(await this.organisations.sites()),
-      departments: nameById(await this.organisations.departments()),
-      vendors: nameById(await em.findBy(Vendor, { id: In(vendorIds) })),
+      sites: namesById(await this.organisations.sites()),
+      departments: namesById(await this.organisations.departments()),
+      vendors: namesById(await em.findBy(Vendor, { id: In(vendorIds) })),
     };
   }
 }
@@ -159,8 +160,4 @@ function itemRow(
 
 function leftOutRow({ candidateId, reason }: LeftOut, { code, name, mandatory }: Candidate): RunLeftOutRow {
   return { candidateId, code, name, reason, mandatory };
-}
-
-function nameById(rows: readonly { id: string; name: string }[]): Map<string, string> {
-  return new Map(rows.map(({ id, name }) => [id, name]));
 }

@@ -28,14 +28,14 @@ export function pointViews(points: readonly RunPointRow[], input: RunInput, cost
     benefit: formatPoints(point.benefit),
     cost: toMoneyModel(point.cost, input.currency),
     capital: toMoneyModel(
-      costAxis === CostAxis.CAPITAL ? point.cost : capitalOf(point, input),
+      costAxis === CostAxis.CAPITAL ? point.cost : capitalOfPoint(point, input),
       input.currency,
     ),
     picks: point.picks,
   }));
 }
 
-export function capitalOf({ picks }: RunPointRow, { items }: RunInput): number {
+function capitalOfPoint({ picks }: RunPointRow, { items }: RunInput): number {
   return picks.reduce((sum, index) => sum + items[index].capitalMinor, 0);
 }
 

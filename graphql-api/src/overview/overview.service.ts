@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import type { Candidate } from '../candidates/entities/candidate.entity.js';
 import { LinksService } from '../candidates/links.service.js';
 import { toMoneyModel } from '../common/models/money.model.js';
-import { RoundCostsService, type RoundCosts } from '../costing/round-costs.service.js';
+import { capitalOf, RoundCostsService, type RoundCosts } from '../costing/round-costs.service.js';
 import { MembershipsService } from '../memberships/memberships.service.js';
 import { Role } from '../memberships/role.enum.js';
 import { OrganisationsService } from '../organisations/organisations.service.js';
@@ -122,8 +122,4 @@ function askedByDepartment(
       candidates,
       asked: toMoneyModel(minor, currency),
     }));
-}
-
-function capitalOf(priced: readonly { capitalMinor: number }[]): number {
-  return priced.reduce((sum, { capitalMinor }) => sum + capitalMinor, 0);
 }

@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { In } from 'typeorm';
 import { quoteFaults } from '@metewand/costing';
 import { Candidate } from '../candidates/entities/candidate.entity.js';
+import { namesById } from '../common/names-by-id.js';
 import { Round } from '../rounds/entities/round.entity.js';
 import { findOrThrow } from '../tenancy/find-or-throw.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
@@ -49,7 +50,7 @@ function search(
 ): Quote[] {
   if (!wanted) return quotes;
   const candidateWords = new Map(candidates.map(({ id, code, name }) => [id, `${code} ${name}`]));
-  const vendorWords = new Map(vendors.map(({ id, name }) => [id, name]));
+  const vendorWords = namesById(vendors);
   const sought = wanted.toLowerCase();
   return quotes.filter(({ number, candidateId, vendorId }) =>
     [number, candidateWords.get(candidateId), vendorWords.get(vendorId)].some((text) =>

@@ -1,6 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { candidateBenefit } from '@metewand/scoring';
 import { Candidate } from '../candidates/entities/candidate.entity.js';
+import { namesById } from '../common/names-by-id.js';
 import { groupByKey } from '../common/request-loader.js';
 import { MembershipsService } from '../memberships/memberships.service.js';
 import { Role } from '../memberships/role.enum.js';
@@ -41,7 +42,7 @@ export class BenefitsService {
       const ids = candidates.map(({ id }) => id);
       const scores = await this.scores.ofRound(roundId);
       const scoresOf = groupByKey(ids, scores, ({ candidateId }) => candidateId);
-      const nameOf = new Map(criteria.map(({ id, name }) => [id, name]));
+      const nameOf = namesById(criteria);
       return new Map(
         ids.map((id, i) => {
           const given = scoresOf[i].map((score) => ({ ...score, assessorId: score.membershipId }));

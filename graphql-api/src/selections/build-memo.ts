@@ -1,5 +1,6 @@
 import { totalsOf } from '@metewand/frontier';
 import { toMoneyModel } from '../common/models/money.model.js';
+import { capitalOf } from '../costing/round-costs.service.js';
 import { certificateView } from '../frontier/run-views.js';
 import { spendableMinor } from '../rounds/spendable.js';
 import { formatPoints } from '../scoring/points.js';
@@ -15,7 +16,7 @@ export function buildMemo(source: MemoSource): Memo {
   const { round, run, result, problem, input } = source;
   const { currency } = input;
   const chosen = chosenOf(source);
-  const capitalMinor = chosen.reduce((sum, each) => sum + each.capitalMinor, 0);
+  const capitalMinor = capitalOf(chosen);
   const lifeCycleCostMinor = chosen.reduce((sum, each) => sum + each.lifeCycleCostMinor, 0);
   const spendable = spendableMinor(round.ceilingMinor, round.heldBackPercent);
   const uses = limitUses(source.limits, chosen, currency);
