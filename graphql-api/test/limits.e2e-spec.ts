@@ -132,6 +132,9 @@ describe('a limit is not saved', () => {
       'no number of candidates',
     ],
     ['without a name', { name: '' }, 'BAD_USER_INPUT', 'Give the limit a name'],
+    ['with a name of blanks', { name: '   ' }, 'BAD_USER_INPUT', 'Give the limit a name'],
+    ['with a name that cannot be kept', { name: 'a\u0000b' }, 'BAD_USER_INPUT', 'cannot be kept'],
+    ['with half a character', { name: 'a\ud800' }, 'BAD_USER_INPUT', 'cannot be kept'],
   ])('%s', async (_case, own, code, message) => {
     const { errors } = await attempt(own);
     expect(errors?.[0].extensions.code).toBe(code);

@@ -53,7 +53,7 @@ export class LimitsService {
       await this.rounds.lockChangeable(em, roundId);
       if ((await em.countBy(Limit, { roundId })) >= MOST_LIMITS) {
         throw new InvalidInputError([
-          { field: 'name', message: `A round has at most ${MOST_LIMITS} limits.` },
+          { field: 'fields.name', message: `A round has at most ${MOST_LIMITS} limits.` },
         ]);
       }
       const refusal = await this.refusalOf(em, roundId, fields);
@@ -99,7 +99,7 @@ export class LimitsService {
     if (fields.siteId) await findOrThrow(em, Site, 'site', fields.siteId);
     const empty = emptinessOf(fields, (await this.organisations.current()).currency);
     if (empty) return new LimitEmpty(empty);
-    const name = fields.name.trim();
+    const { name } = fields;
     const taken =
       name === CEILING_LIMIT_NAME ||
       (await em.existsBy(Limit, { roundId, name, ...(id && { id: Not(id) }) }));
@@ -122,17 +122,19 @@ function boundIn(fields: LimitFieldsInput, field: 'least' | 'most', currency: st
   const text = fields[field];
   if (text === undefined || text === null) return undefined;
   if (fields.measure !== LimitMeasure.ADDED_RUNNING_COST && text.startsWith('-')) {
-    throw new InvalidInputError([{ field, message: 'Only a running cost can be below zero.' }]);
+    throw new InvalidInputError([
+      { field: `fields.${field}`, message: 'Only a running cost can be below zero.' },
+    ]);
   }
   try {
     return boundOf(fields.measure, text, currency);
   } catch (error) {
-    throw new InvalidInputError([{ field, message: (error as Error).message }]);
+    throw new InvalidInputError([{ field: `fields.${field}`, message: (error as Error).message }]);
   }
 }
 
 function columnsOf({ name, measure, siteId, least, most }: LimitFieldsInput) {
-  return { name: name.trim(), measure, siteId: siteId ?? null, least: least ?? null, most: most ?? null };
+  return { name, measure, siteId: siteId ?? null, least: least ?? null, most: most ?? null };
 }
 
 function wordsOf({ name, least, most }: Limit) {

@@ -1,11 +1,12 @@
 import { Field, InputType } from '@nestjs/graphql';
 import { MaxLength, MinLength } from 'class-validator';
+import { IsText } from '../../common/text.validators.js';
 
 @InputType()
 export class SignInInput {
   @Field()
+  @IsText(254)
   @MinLength(1, { message: 'Write your e-mail address' })
-  @MaxLength(254, { message: 'An e-mail address has at most 254 characters' })
   email: string;
 
   @Field()

@@ -1,7 +1,8 @@
 import { Field, ID, InputType, Int } from '@nestjs/graphql';
 import { Type } from 'class-transformer';
-import { IsEnum, IsInt, IsOptional, IsUUID, Length, Matches, ValidateNested } from 'class-validator';
+import { IsEnum, IsInt, IsOptional, IsUUID, Matches, MinLength, ValidateNested } from 'class-validator';
 import { DecimalScalar } from '../../common/scalars/decimal.scalar.js';
+import { IsText } from '../../common/text.validators.js';
 import { LimitMeasure } from '../entities/limit.entity.js';
 
 const BOUND = /^-?\d{1,11}(\.\d{1,2})?$/;
@@ -10,7 +11,8 @@ const BOUND_MESSAGE = 'Write the bound as a number with at most two decimals, su
 @InputType()
 export class LimitFieldsInput {
   @Field()
-  @Length(1, 120, { message: 'Give the limit a name of at most 120 characters' })
+  @IsText(120)
+  @MinLength(1, { message: 'Give the limit a name' })
   name: string;
 
   @Field(() => LimitMeasure)

@@ -1,5 +1,6 @@
 import { createUnionType, Field, ID, InputType, Int, ObjectType } from '@nestjs/graphql';
-import { IsInt, IsUUID, MaxLength, MinLength } from 'class-validator';
+import { IsInt, IsUUID, MinLength } from 'class-validator';
+import { IsText } from '../../common/text.validators.js';
 import { Round } from '../entities/round.entity.js';
 
 @InputType()
@@ -16,8 +17,8 @@ export class AdvanceRoundInput {
 @InputType()
 export class StepBackRoundInput extends AdvanceRoundInput {
   @Field()
+  @IsText(1_000)
   @MinLength(3, { message: 'Say why the round goes back' })
-  @MaxLength(1_000)
   reason: string;
 }
 

@@ -1,6 +1,7 @@
 import { Field, ID, InputType, Int } from '@nestjs/graphql';
-import { IsBoolean, IsInt, IsOptional, IsUUID, Max, MaxLength, Min } from 'class-validator';
+import { IsBoolean, IsInt, IsOptional, IsUUID, Max, Min } from 'class-validator';
 import { HIGHEST_POINTS } from '@metewand/scoring';
+import { IsText } from '../../common/text.validators.js';
 
 const POINTS_MESSAGE = `Give whole points from 0 to ${HIGHEST_POINTS}`;
 
@@ -26,6 +27,6 @@ export class SaveScoreInput {
   cannotJudge: boolean;
 
   @Field()
-  @MaxLength(2_000, { message: 'A reason has at most 2000 characters' })
+  @IsText(2_000)
   reason: string;
 }

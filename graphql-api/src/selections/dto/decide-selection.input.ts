@@ -1,5 +1,6 @@
 import { Field, ID, InputType, Int } from '@nestjs/graphql';
-import { IsEnum, IsInt, IsUUID, MaxLength } from 'class-validator';
+import { IsEnum, IsInt, IsUUID } from 'class-validator';
+import { IsText } from '../../common/text.validators.js';
 import { Decision } from '../selection-transitions.js';
 
 @InputType()
@@ -17,6 +18,6 @@ export class DecideSelectionInput {
   decision: Decision;
 
   @Field()
-  @MaxLength(2_000, { message: 'A comment has at most 2000 characters' })
+  @IsText(2_000)
   comment: string;
 }

@@ -1,5 +1,6 @@
 import { Field, ID, InputType, Int } from '@nestjs/graphql';
-import { IsInt, IsUUID, MaxLength, Min } from 'class-validator';
+import { IsInt, IsUUID, Min } from 'class-validator';
+import { IsText } from '../../common/text.validators.js';
 
 @InputType()
 export class SubmitSelectionInput {
@@ -13,6 +14,6 @@ export class SubmitSelectionInput {
   pointIndex: number;
 
   @Field()
-  @MaxLength(2_000, { message: 'The reason has at most 2000 characters' })
+  @IsText(2_000)
   reason: string;
 }
