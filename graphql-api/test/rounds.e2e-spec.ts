@@ -92,6 +92,18 @@ describe('the ceiling', () => {
     expect(errors?.[0].message).toMatch(message);
     expect(await read()).toEqual(before);
   });
+
+  it('is set by one of several who set it at the same time', async () => {
+    const { version } = await read();
+    const set = (ceiling: string) =>
+      financeDirector.ask(SET_CEILING, {
+        input: { roundId: organisation.roundId, version, ceiling, heldBackPercent: '4' },
+      });
+    const answers = await Promise.all(['1000', '2000', '3000', '4000'].map(set));
+    const codes = answers.map(({ errors }) => errors?.[0].extensions.code ?? 'SAVED');
+    expect(codes.sort()).toEqual(['CONFLICT', 'CONFLICT', 'CONFLICT', 'SAVED']);
+    expect((await read()).version).toBe(version + 1);
+  });
 });
 
 describe('the stage', () => {

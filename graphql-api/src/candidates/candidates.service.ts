@@ -7,7 +7,7 @@ import { Site } from '../organisations/entities/site.entity.js';
 import { OrganisationsService } from '../organisations/organisations.service.js';
 import type { Round } from '../rounds/entities/round.entity.js';
 import { RoundsService } from '../rounds/rounds.service.js';
-import { findOrThrow, lockVersion } from '../tenancy/find-or-throw.js';
+import { findOrThrow, lockOrThrow, lockVersion } from '../tenancy/find-or-throw.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
 import type {
   CandidateFieldsInput,
@@ -35,10 +35,7 @@ export class CandidatesService {
   async lockChangeable(em: EntityManager, id: string): Promise<{ candidate: Candidate; round: Round }> {
     const { roundId } = await findOrThrow(em, Candidate, 'candidate', id);
     const round = await this.rounds.lockChangeable(em, roundId);
-    const candidate = await em.findOneOrFail(Candidate, {
-      where: { id },
-      lock: { mode: 'pessimistic_write' },
-    });
+    const candidate = await lockOrThrow(em, Candidate, 'candidate', id);
     return { candidate, round };
   }
 
@@ -47,7 +44,8 @@ export class CandidatesService {
       await this.rounds.lockChangeable(em, roundId);
       if (lacksReason(fields)) return new MandatoryNeedsReason();
       const columns = await this.columnsOf(em, fields);
-      const code = await nextCodeIn(em, roundId);
+      const taken = await em.find(Candidate, { where: { roundId }, select: { code: true } });
+      const code = nextCode(taken.map((other) => other.code));
       const candidate = em.create(Candidate, {
         roundId,
         code,
@@ -80,7 +78,7 @@ export class CandidatesService {
     const { currency } = await this.organisations.current();
     const { worksNet, consumablesYearly, energyYearly, currentRunningYearly, ...rest } = fields;
     const amounts = { worksNet, consumablesYearly, energyYearly, currentRunningYearly };
-    const minor = readAmounts(currency, 'fields', amounts);
+    const minor = readAmounts(currency, 'fields.', amounts);
     return {
       ...rest,
       worksNetMinor: minor.worksNet,
@@ -101,11 +99,4 @@ export class CandidatesService {
 
 function lacksReason({ mandatory, mandatoryReason }: CandidateFieldsInput): boolean {
   return mandatory && mandatoryReason === '';
-}
-
-/** Two people who add at once wait for each other here, so that each gets a code of its own. */
-async function nextCodeIn(em: EntityManager, roundId: string): Promise<string> {
-  await em.query('select pg_advisory_xact_lock(hashtextextended($1, 0))', [roundId]);
-  const taken = await em.find(Candidate, { where: { roundId }, select: { code: true } });
-  return nextCode(taken.map(({ code }) => code));
 }

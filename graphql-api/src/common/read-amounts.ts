@@ -8,11 +8,11 @@ type Minor<T> = { [K in keyof T]: T[K] extends string ? number : number | null }
 
 /**
  * Amounts as typed to minor units of the currency, under the same names. All that do not fit it are refused at once,
- * each with its name under `path`.
+ * each with its name behind `prefix`, as the validators name fields: "fields.unitPrice".
  */
 export function readAmounts<T extends Record<string, string | null | undefined>>(
   currency: string,
-  path: string,
+  prefix: string,
   amounts: T,
 ): Minor<T> {
   const problems: FieldProblem[] = [];
@@ -21,7 +21,7 @@ export function readAmounts<T extends Record<string, string | null | undefined>>
       return [name, text == null ? null : readAmount(text, currency)];
     } catch (error) {
       if (!(error instanceof MoneyError)) throw error;
-      problems.push({ field: `${path}.${name}`, message: `${name}: ${error.message}` });
+      problems.push({ field: `${prefix}${name}`, message: `${name}: ${error.message}` });
       return [name, null];
     }
   });

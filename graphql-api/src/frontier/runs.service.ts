@@ -6,7 +6,7 @@ import { WrongStageError } from '../common/domain-error.js';
 import { JobsService } from '../jobs/jobs.service.js';
 import { Round } from '../rounds/entities/round.entity.js';
 import { isScoringClosed, RoundStage } from '../rounds/round-stages.js';
-import { findOrThrow } from '../tenancy/find-or-throw.js';
+import { findOrThrow, lockOrThrow } from '../tenancy/find-or-throw.js';
 import { currentMembershipId } from '../tenancy/request-context.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
 import { CostAxis } from './cost-axis.enum.js';
@@ -114,11 +114,7 @@ export class RunsService {
 
 /** The round, locked so that its stage stays and only one search is started. */
 async function lockSearchable(em: EntityManager, roundId: string): Promise<Round> {
-  await findOrThrow(em, Round, 'round', roundId);
-  const round = await em.findOneOrFail(Round, {
-    where: { id: roundId },
-    lock: { mode: 'pessimistic_write' },
-  });
+  const round = await lockOrThrow(em, Round, 'round', roundId);
   if (!isScoringClosed(round.stage))
     throw new WrongStageError('Close scoring first: the search needs the benefit of each candidate.');
   if (round.stage !== RoundStage.SEARCH) {

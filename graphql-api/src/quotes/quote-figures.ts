@@ -25,7 +25,7 @@ export function figuresOf({
     discount,
     serviceYearly: serviceYearly ?? null,
   };
-  const minor = readAmounts(currency, 'fields', amounts);
+  const minor = readAmounts(currency, 'fields.', amounts);
   return {
     unitPriceMinor: minor.unitPrice,
     deliveryMinor: minor.delivery,

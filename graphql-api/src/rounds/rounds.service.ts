@@ -5,7 +5,7 @@ import { AuditService } from '../audit/audit.service.js';
 import { WrongStageError } from '../common/domain-error.js';
 import { readAmounts } from '../common/read-amounts.js';
 import { OrganisationsService } from '../organisations/organisations.service.js';
-import { findOrThrow, lockVersion } from '../tenancy/find-or-throw.js';
+import { findOrThrow, lockOrThrow, lockVersion } from '../tenancy/find-or-throw.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
 import type { SetCeilingInput } from './dto/set-ceiling.input.js';
 import { type AdvanceRoundInput, RoundNotReady, type StepBackRoundInput } from './dto/step-round.input.js';
@@ -46,15 +46,11 @@ export class RoundsService {
   }
 
   /**
-   * The round, locked against a change of stage until the transaction ends, if its contents may be changed.
-   * Every change of candidates, quotes, limits and scores passes here first.
+   * The round, locked until the transaction ends, if its contents may be changed. Every change of candidates, quotes,
+   * limits and scores passes here first, so changes of one round come one after the other.
    */
   async lockChangeable(em: EntityManager, roundId: string): Promise<Round> {
-    await findOrThrow(em, Round, 'round', roundId);
-    const round = await em.findOneOrFail(Round, {
-      where: { id: roundId },
-      lock: { mode: 'pessimistic_read' },
-    });
+    const round = await lockOrThrow(em, Round, 'round', roundId);
     if (!canChangeContents(round.stage)) {
       throw new WrongStageError(
         'A portfolio of this round is submitted or approved, so its figures are frozen.',
@@ -69,7 +65,7 @@ export class RoundsService {
       const round = await lockVersion(em, Round, 'round', input.roundId, input.version);
       const { currency } = await this.organisations.current();
       const before = formatDecimal(money(round.ceilingMinor, currency));
-      round.ceilingMinor = readAmounts(currency, 'input', { ceiling: input.ceiling }).ceiling;
+      round.ceilingMinor = readAmounts(currency, '', { ceiling: input.ceiling }).ceiling;
       round.heldBackPercent = input.heldBackPercent;
       const data = { before, after: input.ceiling, detail: `${input.heldBackPercent} % held back` };
       await this.audit.record(em, 'round.ceiling', { roundId: round.id, data });

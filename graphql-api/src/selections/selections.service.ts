@@ -9,7 +9,7 @@ import { PageLinks } from '../notifications/page-links.js';
 import { Round } from '../rounds/entities/round.entity.js';
 import { RoundStage } from '../rounds/round-stages.js';
 import { RoundsService } from '../rounds/rounds.service.js';
-import { findOrThrow } from '../tenancy/find-or-throw.js';
+import { findOrThrow, lockOrThrow } from '../tenancy/find-or-throw.js';
 import { currentMembershipId } from '../tenancy/request-context.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
 import type { DecideSelectionInput } from './dto/decide-selection.input.js';
@@ -38,22 +38,21 @@ export class SelectionsService {
     return this.db.transaction((em) => em.find(Selection, { where: { roundId }, order: { number: 'DESC' } }));
   }
 
-  /** Approves, returns or declines; never twice, and never by the person who submitted. */
+  /**
+   * Approves, returns or declines; never twice, and never by the person who submitted. The round's lock comes first, as
+   * in submitting, so that neither overtakes the other.
+   */
   decide(input: DecideSelectionInput): Promise<Selection | Refusal> {
     return this.db.transaction(async (em) => {
       const { roundId } = await findOrThrow(em, Selection, 'selection', input.id);
-      const round = await lockRound(em, roundId);
-      const selection = await em.findOneOrFail(Selection, {
-        where: { id: input.id },
-        lock: { mode: 'pessimistic_write' },
-      });
+      const round = await lockOrThrow(em, Round, 'round', roundId);
+      const selection = await lockOrThrow(em, Selection, 'selection', input.id);
       const transition = transitionOf(selection.state, input.decision);
       if (!transition) return new SelectionAlreadyDecided(selection.number, selection.state);
       if (selection.version !== input.version) throw new ConflictError('selection', selection.version);
       if (selection.submittedBy === currentMembershipId()) return new OwnSubmission();
-      const comment = input.comment.trim();
-      if (transition.needsComment && !comment) return new CommentNeeded();
-      return this.carryOut(em, round, selection, transition, comment);
+      if (transition.needsComment && !input.comment) return new CommentNeeded();
+      return this.carryOut(em, round, selection, transition, input.comment);
     });
   }
 
@@ -96,11 +95,6 @@ export class SelectionsService {
     });
     await this.notifications.write(em, [submittedBy], message);
   }
-}
-
-/** Submitting and deciding both begin with this lock, so neither can overtake the other. */
-export async function lockRound(em: EntityManager, roundId: string): Promise<Round> {
-  return em.findOneOrFail(Round, { where: { id: roundId }, lock: { mode: 'pessimistic_write' } });
 }
 
 export function hasOpenSelection(em: EntityManager, roundId: string): Promise<boolean> {

@@ -4,6 +4,7 @@ import { describeViolation, totalsOf, violationsOf } from '@metewand/frontier';
 import { AuditService } from '../audit/audit.service.js';
 import { InvalidInputError, WrongStageError } from '../common/domain-error.js';
 import { amountInWords } from '../common/words.js';
+import { capitalOf } from '../costing/round-costs.service.js';
 import { Run, RunState } from '../frontier/entities/run.entity.js';
 import { fingerprintOf } from '../frontier/fingerprint.js';
 import { ProblemService, UnsearchableError, type FrozenProblem } from '../frontier/problem.service.js';
@@ -15,13 +16,13 @@ import { Role } from '../memberships/role.enum.js';
 import { approvalAsked } from '../notifications/messages/approval-asked.js';
 import { NotificationsService } from '../notifications/notifications.service.js';
 import { PageLinks } from '../notifications/page-links.js';
-import type { Round } from '../rounds/entities/round.entity.js';
+import { Round } from '../rounds/entities/round.entity.js';
 import { RoundStage } from '../rounds/round-stages.js';
 import { RoundsService } from '../rounds/rounds.service.js';
 import { BenefitsService } from '../scoring/benefits.service.js';
 import { CriteriaService } from '../scoring/criteria.service.js';
 import { formatPoints } from '../scoring/points.js';
-import { findOrThrow } from '../tenancy/find-or-throw.js';
+import { findOrThrow, lockOrThrow } from '../tenancy/find-or-throw.js';
 import { currentMembershipId } from '../tenancy/request-context.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
 import { buildMemo } from './build-memo.js';
@@ -30,7 +31,7 @@ import { RunOutdated, SelectionAlreadyOpen } from './dto/submit-selection.result
 import { Selection } from './entities/selection.entity.js';
 import { chosenOf, picksOf, type MemoSource } from './memo-source.js';
 import { SelectionState } from './selection-transitions.js';
-import { hasOpenSelection, lockRound } from './selections.service.js';
+import { hasOpenSelection } from './selections.service.js';
 
 const OPEN_SELECTION_INDEX = 'selection_open';
 
@@ -63,7 +64,7 @@ export class SubmissionsService {
 
   private async submitLocked(em: EntityManager, input: SubmitSelectionInput): Promise<Selection | Refusal> {
     const run = await findOrThrow(em, Run, 'run', input.runId);
-    const round = await lockRound(em, run.roundId);
+    const round = await lockOrThrow(em, Round, 'round', run.roundId);
     if (await hasOpenSelection(em, round.id)) return new SelectionAlreadyOpen();
     if (round.stage !== RoundStage.SEARCH) {
       throw new WrongStageError(
@@ -75,7 +76,7 @@ export class SubmissionsService {
     if (!frozen) return new RunOutdated(run.number);
     const source = await this.memoSource(round, run, result, point, frozen);
     checkAgain(source, point);
-    return this.open(em, source, input.reason.trim());
+    return this.open(em, source, input.reason);
   }
 
   private async pointOf(em: EntityManager, run: Run, pointIndex: number) {
@@ -158,7 +159,7 @@ export class SubmissionsService {
   private async askForApproval(em: EntityManager, source: MemoSource, memoNumber: number, reason: string) {
     const { round, input } = source;
     const chosen = chosenOf(source);
-    const capitalMinor = chosen.reduce((sum, each) => sum + each.capitalMinor, 0);
+    const capitalMinor = capitalOf(chosen);
     const { name } = await em.findOneByOrFail(Membership, { id: currentMembershipId() });
     const directors = await this.memberships.withRole(Role.FINANCE_DIRECTOR);
     const message = approvalAsked({

@@ -28,7 +28,20 @@ export async function findOrThrow<T extends Identified>(
   return row;
 }
 
-/** The row, locked for this transaction, if nobody changed it since `version` was read. */
+/** The same, locked for this transaction. */
+export async function lockOrThrow<T extends Identified>(
+  em: EntityManager,
+  entity: EntityTarget<T>,
+  what: string,
+  id: string,
+) {
+  const where = { id } as FindOptionsWhere<T>;
+  const row = isUuid(id) ? await em.findOne(entity, { where, lock: { mode: 'pessimistic_write' } }) : null;
+  if (!row) throw new NotFoundError(what, id);
+  return row;
+}
+
+/** The same, if nobody changed it since `version` was read. */
 export async function lockVersion<T extends Versioned>(
   em: EntityManager,
   entity: EntityTarget<T>,
@@ -36,10 +49,7 @@ export async function lockVersion<T extends Versioned>(
   id: string,
   version: number,
 ) {
-  const row = isUuid(id)
-    ? await em.findOne(entity, { where: { id } as FindOptionsWhere<T>, lock: { mode: 'pessimistic_write' } })
-    : null;
-  if (!row) throw new NotFoundError(what, id);
+  const row = await lockOrThrow(em, entity, what, id);
   if (row.version !== version) throw new ConflictError(what, row.version);
   return row;
 }
