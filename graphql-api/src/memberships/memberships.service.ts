@@ -15,10 +15,11 @@ export class MembershipsService {
     private readonly sessions: SessionsService,
   ) {}
 
-  viewer(): Promise<Viewer> {
+  /** The organisations are asked for first, over a connection of their own: within a transaction none is waited for. */
+  async viewer(): Promise<Viewer> {
+    const memberships = await this.sessions.membershipsOf(currentCaller().userId ?? '');
     return this.db.transaction(async (em) => {
       const membership = await em.findOneByOrFail(Membership, { id: currentMembershipId() });
-      const memberships = await this.sessions.membershipsOf(currentCaller().userId ?? '');
       return {
         membership,
         email: membership.email,
