@@ -153,6 +153,8 @@ describe('a member of two organisations', () => {
     expect(refused.errors?.[0].message.replace(stranger.id, 'ID')).toBe(
       unknown.errors?.[0].message.replace('00000000-0000-4000-8000-000000000000', 'ID'),
     );
+    const shapeless = await app.ask(SWITCH, { id: '-'.repeat(36) }, switchOrganisation.accessToken);
+    expect(shapeless.errors?.[0].extensions.code).toBe('NOT_FOUND');
   });
 });
 

@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import type { Request, Response } from 'express';
 import { AuditService } from '../audit/audit.service.js';
 import { NotFoundError, UnauthenticatedError } from '../common/domain-error.js';
+import { isUuid } from '../tenancy/find-or-throw.js';
 import { currentCaller, requestScope } from '../tenancy/request-context.js';
 import { TenantDatabase } from '../tenancy/tenant-database.js';
 import type { SignInInput } from './dto/sign-in.input.js';
@@ -23,7 +24,7 @@ export class AuthService {
   /** One answer for an unknown address, a wrong password and a person without a clinic group. */
   async signIn({ email, password }: SignInInput, response: Response): Promise<SignedIn | SignInRefused> {
     const refused: SignInRefused = { message: 'The e-mail address or the password is not right.' };
-    const account = await this.sessions.findAccount(email.trim());
+    const account = await this.sessions.findAccount(email);
     if (!(await passwordMatches(password, account?.passwordHash)) || !account) return refused;
     const [membership] = await this.sessions.membershipsOf(account.userId);
     if (!membership) return refused;
@@ -68,8 +69,7 @@ export class AuthService {
   /** Moves the session to another organisation of the same person. */
   async switchOrganisation(organisationId: string): Promise<SignedIn> {
     const { sessionId } = currentCaller();
-    const known = /^[0-9a-f-]{36}$/i.test(organisationId);
-    if (!sessionId || !known || !(await this.sessions.switchTo(sessionId, organisationId))) {
+    if (!sessionId || !isUuid(organisationId) || !(await this.sessions.switchTo(sessionId, organisationId))) {
       throw new NotFoundError('organisation', organisationId);
     }
     await this.record('session.opened', sessionId, organisationId);
