@@ -1,13 +1,13 @@
 import { compare, hash } from 'bcryptjs';
 
 /** bcrypt reads no further than this many bytes. */
-export const LONGEST_PASSWORD_BYTES = 72;
+const LONGEST_PASSWORD_BYTES = 72;
 const COST = 12;
 
 // Compared when the account is unknown, so that both answers take the same time.
 const nobody = hash('nobody signs in with this', COST);
 
-export function passwordTooLong(password: string): boolean {
+function passwordTooLong(password: string): boolean {
   return Buffer.byteLength(password, 'utf8') > LONGEST_PASSWORD_BYTES;
 }
 
