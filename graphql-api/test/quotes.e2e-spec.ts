@@ -223,6 +223,7 @@ describe('entering a quote', () => {
     ['no number', { number: '  ' }, 'fields.number', 'must not be empty'],
     ['a lead time of eleven years', { leadWeeks: 572 }, 'fields.leadWeeks', 'must not be greater than 520'],
     ['a day no calendar has', { quoteDate: '2027-02-30' }, undefined, 'Write a day as year-month-day'],
+    ['a day of the year 0', { quoteDate: '0000-01-01' }, undefined, 'Write a day as year-month-day'],
   ])('refuses %s and saves nothing', async (_case, changes, field, words) => {
     const before = (await list()).total;
     const { errors } = await create('C43', changes);
