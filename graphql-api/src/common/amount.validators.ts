@@ -18,11 +18,12 @@ export function IsPercent() {
   );
 }
 
-/** A quantity of days, square metres and the like: zero or more, at most two decimals. */
+/** A quantity of days, square metres and the like, as large as its column. */
 export function IsQuantity() {
   return applyDecorators(
-    Matches(/^\d{1,9}(\.\d{1,2})?$/, {
-      message: ({ property }) => `${property} must be zero or more, with at most two decimals`,
+    Matches(/^\d{1,6}(\.\d{1,2})?$/, {
+      message: ({ property }) =>
+        `${property} must be zero or more, less than a million, with at most two decimals`,
     }),
   );
 }

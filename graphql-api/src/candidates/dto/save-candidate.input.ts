@@ -1,16 +1,10 @@
 import { Field, ID, InputType, Int } from '@nestjs/graphql';
 import { Type } from 'class-transformer';
 import { IsBoolean, IsEnum, IsInt, IsUUID, Matches, Max, Min, ValidateNested } from 'class-validator';
-import { IsAmount, IsPercent } from '../../common/amount.validators.js';
+import { IsAmount, IsPercent, IsQuantity } from '../../common/amount.validators.js';
 import { DecimalScalar } from '../../common/scalars/decimal.scalar.js';
 import { IsFilledText, IsText } from '../../common/text.validators.js';
 import { CandidateKind } from '../candidate-kind.enum.js';
-
-const SMALL_QUANTITY = /^\d{1,6}(\.\d{1,2})?$/;
-const smallQuantity = {
-  message: ({ property }: { property: string }) =>
-    `${property} must be zero or more, less than a million, with at most two decimals`,
-};
 
 @InputType()
 export class CandidateFieldsInput {
@@ -71,11 +65,11 @@ export class CandidateFieldsInput {
   currentRunningYearly: string;
 
   @Field(() => DecimalScalar)
-  @Matches(SMALL_QUANTITY, smallQuantity)
+  @IsQuantity()
   installationDays: string;
 
   @Field(() => DecimalScalar)
-  @Matches(SMALL_QUANTITY, smallQuantity)
+  @IsQuantity()
   floorAreaM2: string;
 
   @Field()
