@@ -3,10 +3,11 @@ import { TypeOrmModule } from '@nestjs/typeorm';
 import { MembershipsModule } from '../memberships/memberships.module.js';
 import { Letter } from './entities/letter.entity.js';
 import { NotificationsService } from './notifications.service.js';
+import { PageLinks } from './page-links.js';
 
 @Module({
   imports: [TypeOrmModule.forFeature([Letter]), MembershipsModule],
-  providers: [NotificationsService],
-  exports: [NotificationsService],
+  providers: [NotificationsService, PageLinks],
+  exports: [NotificationsService, PageLinks],
 })
 export class NotificationsModule {}

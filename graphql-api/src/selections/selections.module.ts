@@ -5,7 +5,6 @@ import { FrontierModule } from '../frontier/frontier.module.js';
 import { LimitsModule } from '../limits/limits.module.js';
 import { MembershipsModule } from '../memberships/memberships.module.js';
 import { NotificationsModule } from '../notifications/notifications.module.js';
-import { PageLinks } from '../notifications/page-links.js';
 import { RoundsModule } from '../rounds/rounds.module.js';
 import { ScoringModule } from '../scoring/scoring.module.js';
 import { Selection } from './entities/selection.entity.js';
@@ -25,6 +24,6 @@ import { SubmissionsService } from './submissions.service.js';
     RoundsModule,
     ScoringModule,
   ],
-  providers: [SelectionsService, SubmissionsService, SelectionsResolver, RoundSelectionsResolver, PageLinks],
+  providers: [SelectionsService, SubmissionsService, SelectionsResolver, RoundSelectionsResolver],
 })
 export class SelectionsModule {}
