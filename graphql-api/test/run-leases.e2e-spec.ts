@@ -142,6 +142,22 @@ describe('a run', () => {
     });
   });
 
+  it('waits in the queue once, however often it is found, and for days', async () => {
+    const jobs = await asOwner(async (client) => {
+      await client.query('begin');
+      await client.query(`select set_config('app.organisation_id', $1, true)`, [organisation.id]);
+      const payload = JSON.stringify({ runId: organisation.roundId });
+      for (let time = 1; time <= 3; time += 1)
+        await client.query(`select jobs.enqueue('frontier.search', $1)`, [payload]);
+      const { rows } = await client.query('select max_attempts from graphile_worker.jobs where key like $1', [
+        `%${organisation.roundId}%`,
+      ]);
+      await client.query('rollback');
+      return rows;
+    });
+    expect(jobs).toEqual([{ max_attempts: 25 }]);
+  });
+
   it('that waits is found by a worker that starts, and fails in words when its search breaks', async () => {
     const id = await aRun({ ...PROBLEM, items: [{ id: 'A', benefit: 1, cost: 1, secondCost: 1 }] });
     await change(`update metewand.run set created_at = now() - interval '1 minute' where id = $1`, [id]);

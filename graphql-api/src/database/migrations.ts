@@ -11,6 +11,7 @@ import { Runs1764600010000 } from './migrations/10-runs.js';
 import { Selections1764600011000 } from './migrations/11-selections.js';
 import { Letters1764600012000 } from './migrations/12-letters.js';
 import { Jobs1764600013000 } from './migrations/13-jobs.js';
+import { PatientJobs1764600014000 } from './migrations/14-patient-jobs.js';
 
 /** In the order in which they are run. */
 export const migrations = [
@@ -27,4 +28,5 @@ export const migrations = [
   Selections1764600011000,
   Letters1764600012000,
   Jobs1764600013000,
+  PatientJobs1764600014000,
 ];
