@@ -83,6 +83,24 @@ describe('before scoring closes', () => {
     ]);
   });
 
+  it('somebody who no longer scores is asked for nothing more', async () => {
+    const setRoles = (roles: string) =>
+      asOwner((client) =>
+        inOrganisation(
+          client,
+          organisation.id,
+          'update metewand.membership set roles = $1 where email = $2',
+          [roles, organisation.email('A3')],
+        ),
+      );
+    await setRoles('{AUDITOR}');
+    const { assessors } = await sheet(coordinator);
+    await setRoles('{CLINICAL_ASSESSOR}');
+    expect(assessors.map(({ given, of }: { given: number; of: number }) => [given, of])).toContainEqual([
+      279, 279,
+    ]);
+  });
+
   it('nobody else sees any score, nor what they add up to', async () => {
     expect(await sheet(coordinator)).toMatchObject({ own: [], others: [] });
     expect((await coordinator.get(BENEFIT, { id: organisation.candidate('C08') })).candidate).toEqual({

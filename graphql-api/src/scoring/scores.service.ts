@@ -87,7 +87,7 @@ export class ScoresService {
     });
   }
 
-  /** Everybody who is asked to score, and everybody else who did. */
+  /** Everybody who is asked to score, and everybody else who did; of these nothing more is wanted. */
   private async progress(
     em: EntityManager,
     scores: readonly Score[],
@@ -99,11 +99,15 @@ export class ScoresService {
     const askedIds = new Set(asked.map(({ id }) => id));
     const formerIds = [...given.keys()].filter((id) => !askedIds.has(id));
     const former = await em.find(Membership, { where: { id: In(formerIds) }, order: { name: 'ASC' } });
-    return [...asked, ...former].map((membership) => ({
-      membership,
-      given: given.get(membership.id) ?? 0,
-      of,
-    }));
+    const givenBy = ({ id }: Membership) => given.get(id) ?? 0;
+    return [
+      ...asked.map((membership) => ({ membership, given: givenBy(membership), of })),
+      ...former.map((membership) => ({
+        membership,
+        given: givenBy(membership),
+        of: givenBy(membership),
+      })),
+    ];
   }
 }
 
@@ -119,14 +123,7 @@ async function upsert(
        set points = excluded.points, cannot_judge = excluded.cannot_judge, reason = excluded.reason,
            version = score.version + 1, updated_at = now()
      returning id`,
-    [
-      candidateId,
-      criterionId,
-      currentMembershipId(),
-      cannotJudge ? null : points,
-      cannotJudge,
-      reason.trim(),
-    ],
+    [candidateId, criterionId, currentMembershipId(), cannotJudge ? null : points, cannotJudge, reason],
   );
   return em.findOneByOrFail(Score, { id });
 }
