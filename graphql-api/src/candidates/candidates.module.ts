@@ -13,7 +13,6 @@ import { Link } from './entities/link.entity.js';
 import { LinksByCandidateLoader, LinksByRoundLoader, MembersByLinkLoader } from './links.loader.js';
 import { LinksResolver } from './links.resolver.js';
 import { LinksService } from './links.service.js';
-import { OwnCurrencyLoader } from './own-currency.loader.js';
 import { RoundLinksResolver } from './round-links.resolver.js';
 
 @Module({
@@ -27,7 +26,6 @@ import { RoundLinksResolver } from './round-links.resolver.js';
     CandidatesService,
     CandidatesResolver,
     CandidatesByIdLoader,
-    OwnCurrencyLoader,
     LinksService,
     LinksResolver,
     CandidateLinksResolver,
@@ -36,6 +34,6 @@ import { RoundLinksResolver } from './round-links.resolver.js';
     LinksByRoundLoader,
     MembersByLinkLoader,
   ],
-  exports: [CandidatesService, CandidatesByIdLoader, LinksService, OwnCurrencyLoader],
+  exports: [CandidatesService, CandidatesByIdLoader, LinksService],
 })
 export class CandidatesModule {}

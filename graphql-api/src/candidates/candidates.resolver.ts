@@ -2,12 +2,12 @@ import { Args, ID, Mutation, Parent, Query, ResolveField, Resolver } from '@nest
 import { MoneyModel, toMoneyModel } from '../common/models/money.model.js';
 import { Department } from '../organisations/entities/department.entity.js';
 import { Site } from '../organisations/entities/site.entity.js';
+import { OwnCurrencyLoader } from '../organisations/own-currency.loader.js';
 import { DepartmentsByIdLoader, SitesByIdLoader } from '../organisations/places-by-id.loader.js';
 import { CandidatesService } from './candidates.service.js';
 import { CreateCandidateInput, UpdateCandidateInput } from './dto/save-candidate.input.js';
 import { SaveCandidateResult } from './dto/save-candidate.result.js';
 import { Candidate } from './entities/candidate.entity.js';
-import { OwnCurrencyLoader } from './own-currency.loader.js';
 
 @Resolver(() => Candidate)
 export class CandidatesResolver {

@@ -5,11 +5,18 @@ import { Organisation } from './entities/organisation.entity.js';
 import { Site } from './entities/site.entity.js';
 import { OrganisationsResolver } from './organisations.resolver.js';
 import { OrganisationsService } from './organisations.service.js';
+import { OwnCurrencyLoader } from './own-currency.loader.js';
 import { DepartmentsByIdLoader, SitesByIdLoader } from './places-by-id.loader.js';
 
 @Module({
   imports: [TypeOrmModule.forFeature([Organisation, Site, Department])],
-  providers: [OrganisationsService, OrganisationsResolver, SitesByIdLoader, DepartmentsByIdLoader],
-  exports: [OrganisationsService, SitesByIdLoader, DepartmentsByIdLoader],
+  providers: [
+    OrganisationsService,
+    OrganisationsResolver,
+    OwnCurrencyLoader,
+    SitesByIdLoader,
+    DepartmentsByIdLoader,
+  ],
+  exports: [OrganisationsService, OwnCurrencyLoader, SitesByIdLoader, DepartmentsByIdLoader],
 })
 export class OrganisationsModule {}

@@ -1,6 +1,6 @@
 import { Args, ID, Mutation, Parent, Query, ResolveField, Resolver } from '@nestjs/graphql';
 import { MoneyModel, toMoneyModel } from '../common/models/money.model.js';
-import { OrganisationsService } from '../organisations/organisations.service.js';
+import { OwnCurrencyLoader } from '../organisations/own-currency.loader.js';
 import { SetCeilingInput } from './dto/set-ceiling.input.js';
 import { AdvanceRoundInput, AdvanceRoundResult, StepBackRoundInput } from './dto/step-round.input.js';
 import { ExchangeRate } from './entities/exchange-rate.entity.js';
@@ -12,7 +12,7 @@ import { spendableMinor } from './spendable.js';
 export class RoundsResolver {
   constructor(
     private readonly rounds: RoundsService,
-    private readonly organisations: OrganisationsService,
+    private readonly ownCurrency: OwnCurrencyLoader,
   ) {}
 
   @Query(() => Round)
@@ -37,13 +37,13 @@ export class RoundsResolver {
 
   @ResolveField(() => MoneyModel)
   async ceiling(@Parent() round: Round) {
-    return toMoneyModel(round.ceilingMinor, (await this.organisations.current()).currency);
+    return toMoneyModel(round.ceilingMinor, await this.ownCurrency.current());
   }
 
   @ResolveField(() => MoneyModel, { description: 'The ceiling without the share held back.' })
   async spendable(@Parent() round: Round) {
     const minor = spendableMinor(round.ceilingMinor, round.heldBackPercent);
-    return toMoneyModel(minor, (await this.organisations.current()).currency);
+    return toMoneyModel(minor, await this.ownCurrency.current());
   }
 
   @ResolveField(() => [ExchangeRate])

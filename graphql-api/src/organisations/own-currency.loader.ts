@@ -1,7 +1,7 @@
 import { Injectable } from '@nestjs/common';
 import { RequestLoader } from '../common/request-loader.js';
-import { OrganisationsService } from '../organisations/organisations.service.js';
 import { currentCaller } from '../tenancy/request-context.js';
+import { OrganisationsService } from './organisations.service.js';
 
 /** The currency of the caller's organisation, read once a request: tables have it in every row. */
 @Injectable()
