@@ -5,15 +5,15 @@ import { root, tool } from './root.mjs';
 /** A suite that has not ended by then hangs; it is ended, so that the others run and there is a last line. */
 const limitMinutes = 15;
 
-/** The API and the kernels: jest, with a database and both fakes in its environment. */
+/** The kernels: jest, with nothing around them. */
+export function runKernels(processes, args) {
+  const command = (report) => [...jest(report, ['kernels']), ...args];
+  return runSuite(processes, 'kernels', command, { cwd: join(root, 'graphql-api') });
+}
+
+/** The API: jest, with a database and both fakes in its environment; one file after the other shares them. */
 export function runJest(processes, environment, args) {
-  const command = (report) => [
-    ...tool('jest', 'graphql-api'),
-    '--ci',
-    '--json',
-    `--outputFile=${report}`,
-    ...args,
-  ];
+  const command = (report) => [...jest(report, ['src', 'test']), '--runInBand', ...args];
   return runSuite(processes, 'jest', command, { cwd: join(root, 'graphql-api'), env: environment });
 }
 
@@ -33,6 +33,11 @@ export function runEndToEnd(processes, environment, args) {
 export function notRun(name, error) {
   console.log(`${name} did not get through: ${error.message}`);
   return { name, passed: 0, failed: 1, skipped: 0 };
+}
+
+function jest(report, folders) {
+  const roots = folders.map((folder) => `--roots=${join(root, 'graphql-api', folder)}`);
+  return [...tool('jest', 'graphql-api'), '--ci', '--json', `--outputFile=${report}`, ...roots];
 }
 
 function vitest(report) {

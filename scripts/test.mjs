@@ -17,7 +17,7 @@ import { freePort } from './ports.mjs';
 import { runVerb } from './processes.mjs';
 import { productEnvironment, publicUrlOf, startFakes, startProduct } from './product.mjs';
 import { root } from './root.mjs';
-import { notRun, runEndToEnd, runJest, runVitest } from './suites.mjs';
+import { notRun, runEndToEnd, runJest, runKernels, runVitest } from './suites.mjs';
 
 // Everything: `npm test`. One suite, narrowed: `npm test -- --only=jest -- quotes`.
 
@@ -39,7 +39,11 @@ await runVerb(name, async (processes) => {
   if (only !== 'check') await build(processes).catch((error) => tallies.push(notRun('build', error)));
   await suite('vitest', (part) => runVitest(part, suiteArgs));
   const cluster = await openTestCluster(processes).catch((error) => tallies.push(notRun('postgres', error)));
-  await suite('jest', (part) => jest(part, cluster));
+  // The kernels need one core and no database, the API waits for its database and workers much of the time.
+  await Promise.all([
+    suite('kernels', (part) => runKernels(part, suiteArgs)),
+    suite('jest', (part) => jest(part, cluster)),
+  ]);
   await suite('e2e', (part) => endToEnd(part, cluster));
   return report(tallies);
 });
