@@ -4,6 +4,7 @@ import styled from 'styled-components';
 import { currencySign, formatAmountWhole } from '../../lib/money';
 import { Table } from '../../ui/table';
 import type { Column } from '../../ui/table';
+import { useMedia } from '../../ui/use-media';
 import { useTableParams } from '../../ui/use-table-params';
 import { BenefitRod } from './benefit-rod';
 import { CandidateFlags, flagsOf } from './candidate-flags';
@@ -29,11 +30,12 @@ export function CandidateTable({ rows, selectedId, empty, footer, ...facts }: Ca
   const navigate = useNavigate();
   const { sort, setSort } = useTableParams(FIRST_SORT);
   const dense = selectedId !== null;
+  const wide = useMedia('(min-width: 1400px)');
   return (
     <Size $dense={dense}>
       <Table
         caption="Candidates"
-        columns={columnsFor({ ...facts, dense, params })}
+        columns={columnsFor({ ...facts, dense, wide, params })}
         rows={rows}
         rowKey={({ id }) => id}
         rowHeight={dense ? 36 : 40}
@@ -58,10 +60,11 @@ interface Facts {
   decisionDate: string;
   scored: boolean;
   dense: boolean;
+  wide: boolean;
   params: URLSearchParams;
 }
 
-function columnsFor({ currency, decisionDate, scored, dense, params }: Facts): Column<Row>[] {
+function columnsFor({ currency, decisionDate, scored, dense, wide, params }: Facts): Column<Row>[] {
   const sign = currencySign(currency);
   const lifeCycleCost: Column<Row> = {
     id: 'life-cycle-cost',
@@ -71,6 +74,12 @@ function columnsFor({ currency, decisionDate, scored, dense, params }: Facts): C
     firstDirection: 'desc',
     narrow: 'none',
     cell: (row) => amountOf(row.quoteInForce?.cost.lifeCycleCost),
+  };
+  const site: Column<Row> = {
+    id: 'site',
+    header: 'Site',
+    sortable: true,
+    cell: (row) => row.site.name,
   };
   const quotes: Column<Row>[] = [
     { id: 'quotes', header: 'Quotes', align: 'end', narrow: 'none', cell: (row) => row.quotes.length },
@@ -95,9 +104,9 @@ function columnsFor({ currency, decisionDate, scored, dense, params }: Facts): C
       ),
     },
     { id: 'department', header: 'Department', sortable: true, cell: (row) => row.department.name },
-    { id: 'site', header: 'Site', sortable: true, cell: (row) => row.site.name },
-    // The panel shows the quotes and the life-cycle cost of the chosen candidate in their stead.
-    ...(dense ? [] : quotes),
+    ...(dense && !wide ? [] : [site]),
+    // Where there is no room, the panel shows them.
+    ...(wide && !dense ? quotes : []),
     {
       id: 'capital',
       header: `Capital, ${sign}`,
@@ -107,7 +116,7 @@ function columnsFor({ currency, decisionDate, scored, dense, params }: Facts): C
       narrow: 'end',
       cell: (row) => amountOf(row.quoteInForce?.cost.capital),
     },
-    ...(dense ? [] : [lifeCycleCost]),
+    ...(wide && !dense ? [lifeCycleCost] : []),
     {
       id: 'benefit',
       header: 'Benefit',

@@ -54,6 +54,8 @@ const Grid = styled.dl`
 `;
 
 const Later = styled.span`
+  display: block;
+  line-height: 1.3;
   font-size: 13px;
   font-weight: 400;
 `;
