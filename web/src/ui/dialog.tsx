@@ -35,7 +35,7 @@ export function Dialog({
       width={width}
       position={{ narrow: 'fullscreen', regular: position }}
       renderHeader={Header}
-      renderFooter={footer ? () => <Footer>{footer}</Footer> : undefined}
+      renderFooter={() => (footer ? <Footer>{footer}</Footer> : <></>)}
     >
       {children}
     </PrimerDialog>
