@@ -20,13 +20,14 @@ const VARIANTS = {
 interface TagProps {
   tone?: TagTone;
   icon?: IconName;
+  className?: string;
   children: ReactNode;
 }
 
 /** Notched tag for a flag or a state. The words carry the meaning, tone and icon repeat it. */
-export function Tag({ tone = 'plain', icon, children }: TagProps) {
+export function Tag({ tone = 'plain', icon, className, children }: TagProps) {
   return (
-    <Notched variant={VARIANTS[tone]}>
+    <Notched variant={VARIANTS[tone]} className={className}>
       {icon && <Icon name={icon} size={12} />}
       {children}
     </Notched>

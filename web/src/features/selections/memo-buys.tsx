@@ -81,5 +81,13 @@ const Buys = styled.div`
     tr[data-later] {
       display: table-row;
     }
+    th,
+    td {
+      padding: 1px 0;
+      font-size: 9pt;
+    }
+    small {
+      font-size: inherit;
+    }
   }
 `;

@@ -69,5 +69,12 @@ const Facts = styled.div`
   dd {
     max-width: 60%;
     text-align: right;
+    overflow-wrap: anywhere;
+  }
+  @media print {
+    dl > div {
+      padding: 1px 0;
+      font-size: 9pt;
+    }
   }
 `;

@@ -11,6 +11,7 @@ import { MemoFacts } from './memo-facts';
 import { MemoLeftOut } from './memo-left-out';
 import { MemoPart } from './memo-part';
 import { MemoRod } from './memo-rod';
+import { MemoSignatures } from './memo-signatures';
 import type { SelectionMemo } from './selection-memo';
 import { DECISION_WORDS, memoCode, STATE_TONES } from './selection-words';
 
@@ -28,8 +29,8 @@ export function MemoPage({ selection, decisionDate, candidates }: MemoPageProps)
     <Paper>
       <Mark size={34} />
       <p className="muted small">
-        {`${memo.roundName} · memo ${memoCode(decisionDate, selection.number)} · prepared by ${submittedBy.name}, ${formatInstant(submittedAt)} `}
-        <Tag tone={STATE_TONES[state]}>{DECISION_WORDS[state]}</Tag>
+        {`${memo.roundName} · memo ${memoCode(decisionDate, selection.number)} · prepared by ${submittedBy.name}, ${formatInstant(submittedAt)}`}
+        <State tone={STATE_TONES[state]}>{DECISION_WORDS[state]}</State>
       </p>
       <h1>Purchase of equipment</h1>
       {comment && (
@@ -70,6 +71,7 @@ export function MemoPage({ selection, decisionDate, candidates }: MemoPageProps)
           </MemoPart>
         }
       />
+      <MemoSignatures selection={selection} />
       <Fingerprint>{`Run ${memo.runNumber} · fingerprint of this memo ${selection.fingerprint}`}</Fingerprint>
     </Paper>
   );
@@ -110,6 +112,18 @@ const Paper = styled.article`
       font-size: 22px;
     }
   }
+  @media print {
+    padding: 0;
+    border: 0;
+    > svg:first-child {
+      right: 0;
+      top: 0;
+    }
+  }
+`;
+
+const State = styled(Tag)`
+  margin-left: 8px;
 `;
 
 const Ask = styled.p`
