@@ -1,4 +1,4 @@
-import { screen, within } from '@testing-library/react';
+import { screen, waitFor, within } from '@testing-library/react';
 import { expect, test } from 'vitest';
 import { aRound, aViewer } from '../test/factories';
 import { fakeLink } from '../test/fake-link';
@@ -120,6 +120,23 @@ test('shows a refusal beside the decision and keeps the comment', async () => {
   await user.click(screen.getByRole('button', { name: /^Approve/u }));
   expect(await screen.findByRole('alert')).toHaveTextContent(message);
   expect(screen.getByLabelText('Comment')).toHaveValue('Good.');
+});
+
+test('keeps the refusal in sight where somebody else has decided meanwhile', async () => {
+  const message = 'This portfolio was decided already.';
+  let decidedElsewhere = false;
+  const link = as('FINANCE_DIRECTOR', {
+    RoundSelection: () => page([aSelection(decidedElsewhere ? { state: 'APPROVED', version: 3 } : {})]),
+    DecideSelection: () => {
+      decidedElsewhere = true;
+      return { decideSelection: { __typename: 'SelectionAlreadyDecided', message } };
+    },
+  });
+  const { user } = await renderRoute(PATH, link);
+  await user.click(await screen.findByRole('button', { name: /^Approve/u }));
+  expect(await screen.findByRole('alert')).toHaveTextContent(message);
+  await waitFor(() => expect(screen.queryByRole('button', { name: /^Approve/u })).not.toBeInTheDocument());
+  expect(screen.getByRole('alert')).toHaveTextContent(message);
 });
 
 test('offers no decision to the coordinator, nor to who submitted it', async () => {

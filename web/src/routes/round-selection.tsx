@@ -120,7 +120,10 @@ const Beside = styled.div`
   display: grid;
   gap: 16px;
   @media (max-width: 767px) {
-    padding: 0 16px 16px;
+    display: contents;
+    > * {
+      margin-inline: 16px;
+    }
   }
 `;
 
@@ -137,7 +140,9 @@ const Decide = styled.div`
     position: sticky;
     bottom: 0;
     z-index: 5;
-    margin: 0 -16px;
     order: 1;
+    && {
+      margin-inline: 0;
+    }
   }
 `;

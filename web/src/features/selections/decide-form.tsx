@@ -7,11 +7,13 @@ import type { Amount } from '../../lib/money';
 import { announce } from '../../ui/announce';
 import { Button } from '../../ui/button';
 import { TextAreaField } from '../../ui/field';
-import { Notice } from '../../ui/notice';
+import { useNarrow } from '../../ui/use-media';
 import { useDecideSelection } from './use-decide-selection';
 
 interface DecideFormProps {
   selection: { id: string; version: number; memo: { capital: Amount } };
+  /** Called with why it was refused, with undefined once it went. */
+  onRefused: (refusal: string | undefined) => void;
 }
 
 const DONE: Record<Decision, string> = {
@@ -22,11 +24,11 @@ const DONE: Record<Decision, string> = {
 const COMMENT_NEEDED = 'Write a comment to return or decline: the preparer reads it.';
 
 /** The signature of the finance director: approve, return with a comment, or decline with one. */
-export function DecideForm({ selection }: DecideFormProps) {
+export function DecideForm({ selection, onRefused }: DecideFormProps) {
   const { decide, loading } = useDecideSelection();
+  const narrow = useNarrow();
   const [comment, setComment] = useState('');
   const [commentError, setCommentError] = useState<string>();
-  const [refusal, setRefusal] = useState<string>();
 
   async function press(decision: Decision) {
     const missing = decision !== 'APPROVE' && comment.trim() === '';
@@ -34,19 +36,19 @@ export function DecideForm({ selection }: DecideFormProps) {
     if (missing) return;
     try {
       const message = await decide(selection, decision, comment.trim());
-      setRefusal(message);
+      onRefused(message);
       if (!message) announce(DONE[decision]);
     } catch (error) {
-      setRefusal(errorMessage(error));
+      onRefused(errorMessage(error));
     }
   }
 
   return (
     <Form onSubmit={(event) => event.preventDefault()}>
-      {refusal && <Notice tone="bad" title={refusal} alert />}
       <TextAreaField
         label="Comment"
         labelAside={<span className="muted small">needed to return or decline</span>}
+        rows={narrow ? 1 : 3}
         value={comment}
         error={commentError}
         maxLength={5000}
