@@ -29,12 +29,17 @@ export function FeedList({ entries }: { entries: readonly FeedEntryFragment[] })
           </time>
           <span>
             {entry.sentence}
-            <small>{[entry.detail, entry.by?.name].filter(Boolean).join(', by ')}</small>
+            <small>{detailOf(entry)}</small>
           </span>
         </li>
       ))}
     </List>
   );
+}
+
+/** "C-57 Test scanner, by Hanne Vos". A reason somebody wrote may end in a full stop, which the name would follow. */
+function detailOf({ detail, by }: FeedEntryFragment): string {
+  return [detail?.replace(/\.$/u, ''), by?.name].filter(Boolean).join(', by ');
 }
 
 const List = styled.ol`
