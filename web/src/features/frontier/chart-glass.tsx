@@ -5,12 +5,13 @@ import type { Box, Geometry } from './chart-geometry';
 import { px, stepPath } from './chart-geometry';
 import { Shield } from './chart-marks';
 import { Peg } from './chart-steps';
+import { holds } from './place-labels';
 import type { Portfolio } from './portfolio';
 import { PEG_GAP, thinPegs } from './thin-pegs';
 import { points } from './wording';
 
-/** How many times larger the glass shows what lies around A. */
-const GLASS_POWER = 5;
+/** How many times larger the glass may show what lies around A, the best first. */
+const POWERS = [5, 4, 3];
 
 interface ChartGlassProps {
   geometry: Geometry;
@@ -26,14 +27,16 @@ interface ChartGlassProps {
 /** The surroundings of A enlarged, with the same corner brackets here and there. */
 export function ChartGlass({ geometry, glass, portfolios, selected, bound, atMost, hatch }: ChartGlassProps) {
   const clip = useId();
-  const seen = seenThrough(glass, geometry, selected);
+  const power = powerFor(glass, geometry, portfolios, selected);
+  if (power === undefined) return null;
+  const seen = seenThrough(glass, power, geometry, selected);
   const enlarge = ([cost, benefit]: readonly [number, number]): readonly [number, number] => [
-    glass.x + (geometry.x(cost) - seen.x) * GLASS_POWER,
-    glass.y + (geometry.y(benefit) - seen.y) * GLASS_POWER,
+    glass.x + (geometry.x(cost) - seen.x) * power,
+    glass.y + (geometry.y(benefit) - seen.y) * power,
   ];
   const steps = portfolios.map(({ cost, benefit }) => enlarge([cost, benefit]));
   const [atX, atY] = enlarge([selected.cost, selected.benefit]);
-  const shown = portfolios.filter((_, place) => Math.abs(steps[place]![0] - atX) <= glass.width / 2);
+  const shown = portfolios.filter((_, place) => holds(glass, ...steps[place]!));
   const pegs = thinPegs(
     shown.map(({ index }) => steps[index]!),
     PEG_GAP,
@@ -72,7 +75,7 @@ export function ChartGlass({ geometry, glass, portfolios, selected, bound, atMos
         textAnchor="end"
         className="note halo"
       >
-        Around A, {GLASS_POWER} times larger
+        Around A, {power} times larger
       </text>
       <Brackets box={glass} length={13} />
       <Brackets box={seen} length={6} />
@@ -80,11 +83,20 @@ export function ChartGlass({ geometry, glass, portfolios, selected, bound, atMos
   );
 }
 
-/** The part of the plot that the glass shows, in its unenlarged size: A stands in the middle. */
-function seenThrough(glass: Box, { x, y }: Geometry, { cost, benefit }: Portfolio): Box {
-  const width = glass.width / GLASS_POWER;
-  const height = glass.height / GLASS_POWER;
-  return { x: x(cost) - width / 2, y: y(benefit) - height * 0.56, width, height };
+/** The greatest power at which the glass shows another portfolio beside A; undefined where it would show A alone. */
+function powerFor(glass: Box, geometry: Geometry, portfolios: readonly Portfolio[], selected: Portfolio) {
+  const { x, y } = geometry;
+  return POWERS.find((power) => {
+    const seen = seenThrough(glass, power, geometry, selected);
+    return portfolios.some((each) => each !== selected && holds(seen, x(each.cost), y(each.benefit)));
+  });
+}
+
+/** The part of the plot that the glass shows, in its unenlarged size: A stands a little left of the middle. */
+function seenThrough(glass: Box, power: number, { x, y }: Geometry, { cost, benefit }: Portfolio): Box {
+  const width = glass.width / power;
+  const height = glass.height / power;
+  return { x: x(cost) - width * 0.44, y: y(benefit) - height * 0.56, width, height };
 }
 
 function AtMost({ glass, points: most }: { glass: Box; points: string }) {
