@@ -43,8 +43,9 @@ export function layoutOf({
   const { portfolios, scale, knee, costAxis, ceiling } = front;
   const markAt = (portfolio: Portfolio) => {
     const [x, y] = places[portfolio.index]!;
-    return { x, y, text: valueText(portfolio) };
+    return { x, y, text: valueText(portfolio, knee) };
   };
+  const kneeIsFree = knee !== undefined && knee !== selected.index && knee !== compared?.index;
   return layoutLabels({
     geometry,
     line: places,
@@ -55,7 +56,8 @@ export function layoutOf({
       y: geometry.y(portfolios[next.to]!.benefit),
       text: signedPoints(next.gain),
     },
-    knee: knee === undefined ? undefined : markAt(portfolios[knee]!),
+    // The mark of A or B would lie over the square, so its box names the knee instead.
+    knee: kneeIsFree ? markAt(portfolios[knee]!) : undefined,
     ceilingX: costAxis === 'CAPITAL' ? geometry.x(Number(ceiling.amount)) : undefined,
     withGlass,
   });

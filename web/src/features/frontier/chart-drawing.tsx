@@ -10,7 +10,7 @@ import { Hatches } from './chart-hatches';
 import { ChartKnee } from './chart-knee';
 import { layoutOf, pegPlaces, placesOf } from './chart-drawing-layout';
 import { ChartNextStep } from './chart-next-step';
-import { ChartSelection } from './chart-selection';
+import { ChartSelection, valueText } from './chart-selection';
 import { ChartSteps } from './chart-steps';
 import type { Front } from './front';
 import { gainForMore } from './marginal-gain';
@@ -86,9 +86,21 @@ export function ChartDrawing({ front, geometry, gridValues, chosen, narrow }: Ch
         />
       )}
       {compared && layout.b && (
-        <ChartSelection geometry={geometry} portfolio={compared} label={layout.b} letter="B" />
+        <ChartSelection
+          geometry={geometry}
+          portfolio={compared}
+          label={layout.b}
+          text={valueText(compared, knee)}
+          letter="B"
+        />
       )}
-      <ChartSelection geometry={geometry} portfolio={selected} label={layout.a} letter="A" />
+      <ChartSelection
+        geometry={geometry}
+        portfolio={selected}
+        label={layout.a}
+        text={valueText(selected, knee)}
+        letter="A"
+      />
     </Drawing>
   );
 }

@@ -8,11 +8,19 @@ interface ChartSelectionProps {
   geometry: Geometry;
   portfolio: Portfolio;
   label: Box;
+  /** The words in the box. */
+  text: string;
   letter: 'A' | 'B';
 }
 
 /** A portfolio somebody has chosen: its mark, the plumb line down to the rod, and its figures in a box. */
-export function ChartSelection({ geometry: { plot, x, y }, portfolio, label, letter }: ChartSelectionProps) {
+export function ChartSelection({
+  geometry: { plot, x, y },
+  portfolio,
+  label,
+  text,
+  letter,
+}: ChartSelectionProps) {
   const at = { x: x(portfolio.cost), y: y(portfolio.benefit) };
   const selected = letter === 'A';
   return (
@@ -25,12 +33,12 @@ export function ChartSelection({ geometry: { plot, x, y }, portfolio, label, let
         strokeDasharray={selected ? undefined : '1.5 3'}
       />
       {selected ? <Shield {...at} /> : <Diamond {...at} />}
-      <ValueBox box={label} text={valueText(portfolio)} look={selected ? 'filled' : 'compared'} />
+      <ValueBox box={label} text={text} look={selected ? 'filled' : 'compared'} />
     </g>
   );
 }
 
-/** "2.30 M · 818.7": the figures beside a mark. */
-export function valueText({ cost, benefit }: Portfolio): string {
-  return `${shortCost(cost)} · ${points(benefit)}`;
+/** "2.30 M · 818.7": the figures beside a mark, which says too that it stands at the knee. */
+export function valueText({ index, cost, benefit }: Portfolio, knee: number | undefined): string {
+  return `${shortCost(cost)} · ${points(benefit)}${index === knee ? ' · knee' : ''}`;
 }
