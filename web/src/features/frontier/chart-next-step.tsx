@@ -4,6 +4,9 @@ import { ValueBox } from './chart-marks';
 import type { Portfolio } from './portfolio';
 import { signedPoints } from './wording';
 
+/** Below a mark that stands lower, the words on the rod would lie over its sign. */
+const WORDS_NEED_PX = 56;
+
 interface ChartNextStepProps {
   geometry: Geometry;
   from: Portfolio;
@@ -46,17 +49,18 @@ export function ChartNextStep({ geometry, from, to, step, stepText, flag }: Char
         stroke="var(--mw-ink)"
         strokeWidth="1.5"
       />
-      {['next', stepText].map((text, line) => (
-        <text
-          key={line}
-          x={px(left + Math.max(24, (right - left) / 2))}
-          y={floor - 27 + line * 14}
-          textAnchor="middle"
-          className="note halo strong"
-        >
-          {text}
-        </text>
-      ))}
+      {floor - y(from.benefit) > WORDS_NEED_PX &&
+        ['next', stepText].map((text, line) => (
+          <text
+            key={line}
+            x={px(left + Math.max(24, (right - left) / 2))}
+            y={floor - 27 + line * 14}
+            textAnchor="middle"
+            className="note halo strong"
+          >
+            {text}
+          </text>
+        ))}
     </g>
   );
 }
