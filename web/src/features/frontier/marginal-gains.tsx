@@ -43,13 +43,13 @@ function lessText({ enters, leaves }: Exchange, front: Front): ReactNode {
 
 const MOST_NAMES = 3;
 
-/** "Adds CT tube, Steam steriliser"; the second of two begins after a semicolon. */
+/** "Adds CT tube · Steam steriliser", as names hold commas themselves; the second of two begins after a semicolon. */
 function names(verb: string, items: readonly number[], { items: all }: Front): string {
   if (items.length === 0) return '';
   const isFirst = /^[A-Z]/u.test(verb);
   const named = items.slice(0, MOST_NAMES).map((item) => all[item]!.name);
   const rest = items.length > MOST_NAMES ? ` and ${items.length - MOST_NAMES} more` : '';
-  return `${isFirst ? '' : '; '}${verb} ${named.join(', ')}${rest}`;
+  return `${isFirst ? '' : '; '}${verb} ${named.join(' · ')}${rest}`;
 }
 
 function Step({ figure, title, children }: { figure?: string; title: string; children: ReactNode }) {
