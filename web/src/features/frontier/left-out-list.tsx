@@ -15,9 +15,9 @@ export function LeftOutList({ leftOut }: { leftOut: Run['leftOut'] }) {
           <li key={candidateId}>
             <b>{name}</b> <span className="muted">{code}</span>
             {mandatory && (
-              <Tag tone="caution" icon="warn">
+              <Mandatory tone="caution" icon="warn">
                 Mandatory
-              </Tag>
+              </Mandatory>
             )}
             <p className="muted">{reason}</p>
           </li>
@@ -47,7 +47,8 @@ const Place = styled.section`
     padding: 6px 16px;
     border-bottom: 1px solid var(--mw-line);
   }
-  li > :nth-child(3) {
-    margin-left: 8px;
-  }
+`;
+
+const Mandatory = styled(Tag)`
+  margin-left: 8px;
 `;
