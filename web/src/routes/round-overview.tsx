@@ -19,6 +19,7 @@ import { StageActions } from '../features/rounds/stage-actions';
 import { StepBackDialog } from '../features/rounds/step-back-dialog';
 import { preloadQuery } from '../lib/apollo';
 import { formatPercent } from '../lib/money';
+import { stepIndex } from '../lib/round-stage';
 import { Page, PageHeader } from '../ui/page';
 import { unlessOnly, useOpenParam } from '../ui/use-open-param';
 import type { RoundOverviewQuery, RoundOverviewQueryVariables } from './round-overview.generated';
@@ -91,7 +92,12 @@ export function Component() {
       />
       <RoundSteps round={round} counts={overview} />
       <Grid>
-        <ToSettleList roundId={round.id} items={overview.toSettle} settled={overview.settled} />
+        <ToSettleList
+          roundId={round.id}
+          items={overview.toSettle}
+          settled={overview.settled}
+          decided={stepIndex(round.stage) > stepIndex('DECIDE')}
+        />
         <Feed>
           <LatestFeed entries={auditFeed.items} onOpenAll={() => setOpen('activity')} />
         </Feed>

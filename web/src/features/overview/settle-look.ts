@@ -18,7 +18,7 @@ interface ToSettle {
 /** How an open thing looks, and where it is settled: with one candidate, straight at that candidate's quotes. */
 export function settleLook(roundId: string, { kind, candidateIds }: ToSettle): SettleLook {
   const only = candidateIds.length === 1 ? candidateIds[0] : undefined;
-  const quotes = only ? paths.candidateQuotes(roundId, only) : paths.quotes(roundId);
+  const quotes = only ? paths.candidateQuotes(roundId, only) : `${paths.quotes(roundId)}?only=to-settle`;
   switch (kind) {
     case 'NO_OPEN_QUOTE':
       return {

@@ -27,12 +27,17 @@ interface ToSettleListProps {
   roundId: string;
   items: readonly ToSettleItemFragment[];
   settled: number;
+  /** Once the decision is made, what is still open stays as a record. */
+  decided: boolean;
 }
 
 /** What is missing before the decision, who settles it, and the way to where it is settled. */
-export function ToSettleList({ roundId, items, settled }: ToSettleListProps) {
+export function ToSettleList({ roundId, items, settled, decided }: ToSettleListProps) {
   return (
-    <Section title="Missing before the decision" aside={`${items.length} open, ${settled} settled`}>
+    <Section
+      title={decided ? 'Left open at the decision' : 'Missing before the decision'}
+      aside={`${items.length} open, ${settled} settled`}
+    >
       {items.length === 0 ? (
         <Empty plain title="Everything is settled">
           Quotes, scores and links are complete. What turns up later appears here.
