@@ -12,7 +12,7 @@ export function RouteError() {
   const { revalidate, state } = useRevalidator();
   if (isRouteErrorResponse(error) && error.status === 404) return <NoSuchPage />;
   const code = errorCode(error);
-  if (code === 'NOT_FOUND') return <Gone message={errorMessage(error)} />;
+  if (code === 'NOT_FOUND') return <Gone />;
   if (code === 'FORBIDDEN') return <Forbidden />;
   return (
     <ProblemPage
@@ -48,11 +48,11 @@ export function StandAloneError() {
   );
 }
 
-function Gone({ message }: { message: string }) {
+function Gone() {
   return (
     <ProblemPage
       title="It is not here"
-      what={`${message} It may have been removed, or it belongs to another clinic group of yours.`}
+      what="What this address points at may have been removed, or it belongs to another clinic group of yours."
       ways={[
         {
           title: 'Go to the start page',
