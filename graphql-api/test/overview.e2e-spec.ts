@@ -86,7 +86,7 @@ describe('the overview of a round', () => {
     ]);
     expect(open[0].title).toMatch(/^D-05 .+ has no quote open on 15 Feb 2027$/);
     expect(open[0].detail).toMatch(
-      /^It is mandatory and would be left out\. D05-Q1: it runs out on 2027-02-12/,
+      /^It is mandatory and would be left out\. D05-Q1: it runs out on 12 Feb 2027/,
     );
     expect(open[0].by).toEqual({ name: 'Callum Reed' });
   });

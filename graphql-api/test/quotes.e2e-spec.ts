@@ -186,12 +186,12 @@ describe('entering a quote', () => {
     [
       'QuoteDatesReversed',
       { validUntil: '2027-01-03' },
-      'run out on 2027-01-03, before its own date, 2027-01-04',
+      'run out on 3 Jan 2027, before its own date, 4 Jan 2027',
     ],
     [
       'DiscountExceedsPrice',
       { discount: '2100.01' },
-      '2100.01 EUR, is more than all that is quoted, 2100.00 EUR',
+      '2\u00a0100.01\u00a0EUR, is more than all that is quoted, 2\u00a0100.00\u00a0EUR',
     ],
     [
       'QuoteNumberTaken',

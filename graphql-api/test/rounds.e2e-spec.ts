@@ -60,7 +60,7 @@ describe('the ceiling', () => {
       () => coordinator,
       {},
       'FORBIDDEN',
-      'Your roles do not allow this. It needs FINANCE_DIRECTOR.',
+      'Your roles do not allow this. It needs the role finance director.',
     ],
     [
       'a negative amount',

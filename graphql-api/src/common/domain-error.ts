@@ -22,7 +22,8 @@ export class UnauthenticatedError extends DomainError {
 export class ForbiddenError extends DomainError {
   readonly code = 'FORBIDDEN';
   constructor(roles: readonly string[]) {
-    super(`Your roles do not allow this. It needs ${roles.join(' or ') || 'a role of the clinic group'}.`);
+    const inWords = roles.map((role) => role.toLowerCase().replaceAll('_', ' ')).join(' or ');
+    super(`Your roles do not allow this. ${inWords ? `It needs the role ${inWords}` : 'No role does'}.`);
   }
 }
 

@@ -1,6 +1,6 @@
-import { formatDecimal, money } from '@metewand/money';
 import { InvalidInputError } from '../common/domain-error.js';
 import { readAmounts } from '../common/read-amounts.js';
+import { amountInWords } from '../common/words.js';
 import type { QuoteFieldsInput } from './dto/save-quote.input.js';
 import { DiscountExceedsPrice } from './dto/save-quote.result.js';
 
@@ -50,8 +50,9 @@ export function discountProblem(
     const message = 'unitPrice: the whole quote comes to more than can be planned with here.';
     throw new InvalidInputError([{ field: 'fields.unitPrice', message }]);
   }
-  const inWords = (minor: number) => `${formatDecimal(money(minor, currency))} ${currency}`;
-  return discountMinor > quotedMinor
-    ? new DiscountExceedsPrice(inWords(discountMinor), inWords(quotedMinor))
-    : null;
+  if (discountMinor <= quotedMinor) return null;
+  return new DiscountExceedsPrice(
+    amountInWords(discountMinor, currency),
+    amountInWords(quotedMinor, currency),
+  );
 }

@@ -1,4 +1,5 @@
 import { createUnionType, Field, ObjectType } from '@nestjs/graphql';
+import { dayInWords } from '../../common/words.js';
 import { Quote } from '../entities/quote.entity.js';
 
 @ObjectType()
@@ -29,7 +30,7 @@ export class QuoteDatesReversed {
   message: string;
 
   constructor(quoteDate: string, validUntil: string) {
-    this.message = `The quote would run out on ${validUntil}, before its own date, ${quoteDate}. Check both dates.`;
+    this.message = `The quote would run out on ${dayInWords(validUntil)}, before its own date, ${dayInWords(quoteDate)}. Check both dates.`;
   }
 }
 
