@@ -8,7 +8,7 @@ import { ENV, type Env } from './config/env.js';
 
 /** Refused before anything is executed. The cost limit is in the guard's own points: 2 an object, 1 a field, ×1.5 a level. */
 const armor = new ApolloArmor({
-  maxDepth: { n: 10 },
+  maxDepth: { n: 10, flattenFragments: true },
   maxAliases: { n: 30 },
   maxDirectives: { n: 50 },
   maxTokens: { n: 5_000 },
@@ -31,6 +31,7 @@ export const GraphqlModule = NestGraphQLModule.forRootAsync<ApolloDriverConfig>(
       includeStacktraceInErrorResponses: false,
       allowBatchedHttpRequests: false,
       csrfPrevention: true,
+      persistedQueries: false,
       context: ({ req, res }: GraphqlContext): GraphqlContext => ({ req, res }),
       formatError,
       validationRules,

@@ -51,6 +51,22 @@ describe('the edge of the API', () => {
     },
   );
 
+  it.each([
+    [
+      'of a name that it does not hold',
+      { query: 'query A { __typename }', operationName: 'B' },
+      'OPERATION_RESOLUTION_FAILURE',
+    ],
+    [
+      'known by its hash alone',
+      { extensions: { persistedQuery: { version: 1, sha256Hash: '0'.repeat(64) } } },
+      'PERSISTED_QUERY_NOT_SUPPORTED',
+    ],
+  ])('refuses an operation %s', async (_case, body, code) => {
+    const { errors } = (await app.post().send(body)).body as Answer;
+    expect(errors?.[0].extensions.code).toBe(code);
+  });
+
   it('refuses a body over one megabyte', async () => {
     const response = await app
       .post()

@@ -10,6 +10,8 @@ const SAFE_CODES = new Set([
   'GRAPHQL_VALIDATION_FAILED',
   'BAD_REQUEST',
   'BAD_USER_INPUT',
+  'OPERATION_RESOLUTION_FAILURE',
+  'PERSISTED_QUERY_NOT_SUPPORTED',
 ]);
 
 /** The only way out for errors: a code, words a person can act on, the request's id, and nothing of our insides. */
