@@ -1,5 +1,6 @@
 import { Injectable } from '@nestjs/common';
 import { Not, type EntityManager } from 'typeorm';
+import { MoneyError } from '@metewand/money';
 import { AuditService } from '../audit/audit.service.js';
 import { InvalidInputError } from '../common/domain-error.js';
 import { RoundCostsService } from '../costing/round-costs.service.js';
@@ -129,7 +130,8 @@ function boundIn(fields: LimitFieldsInput, field: 'least' | 'most', currency: st
   try {
     return boundOf(fields.measure, text, currency);
   } catch (error) {
-    throw new InvalidInputError([{ field: `fields.${field}`, message: (error as Error).message }]);
+    if (!(error instanceof MoneyError || error instanceof RangeError)) throw error;
+    throw new InvalidInputError([{ field: `fields.${field}`, message: error.message }]);
   }
 }
 
