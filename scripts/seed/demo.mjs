@@ -21,17 +21,18 @@ export const demoSignIns = scenario.organisations.flatMap(({ id, name: organisat
 );
 
 /**
- * Puts both demo organisations into an empty database, each in one transaction. Does nothing when they are there.
- * Needs the owner's connection: only a role that owns the tables may create organisations.
+ * Puts the demo organisations that are not there yet into the database, each in one transaction; says whether there
+ * were any. Needs the owner's connection: only a role that owns the tables may create organisations.
  */
 export async function seedDemo(ownerUrl) {
   const client = new pg.Client(ownerUrl);
   await client.connect();
   try {
-    const { rows } = await client.query('select count(*)::int as people from identity.app_user');
-    if (rows[0].people > 0) return false;
+    const missing = [];
+    for (const { id } of scenario.organisations) if (!(await isThere(client, id))) missing.push(id);
+    if (missing.length === 0) return false;
     const passwordHash = await hash(demoPassword, BCRYPT_COST);
-    for (const { id } of scenario.organisations) await seedOrganisation(client, id, PEOPLE[id], passwordHash);
+    for (const id of missing) await seedOrganisation(client, id, PEOPLE[id], passwordHash);
     return true;
   } finally {
     await client.end();
@@ -64,6 +65,13 @@ export async function seedOrganisation(client, key, people, passwordHash) {
   ]);
   await client.query('commit');
   return { id, ...rows };
+}
+
+/** An organisation is there with its people: its first person belongs to no other. */
+async function isThere(client, key) {
+  const [{ email }] = PEOPLE[key];
+  const { rowCount } = await client.query('select from identity.app_user where email = $1', [email]);
+  return rowCount > 0;
 }
 
 /** Somebody who is a member of both organisations has one account. */
