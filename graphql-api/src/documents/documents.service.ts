@@ -31,22 +31,28 @@ export class DocumentsService {
     await em.save(document);
   }
 
-  /** A link for the signed-in person alone to see once; every opening is written down. */
+  /** A link that is good for a minute; every opening is written down. */
   async open(id: string): Promise<DownloadLink> {
-    const { fileName, contentType } = await this.db.transaction(async (em) => {
+    const { fileName, contentType, sha256 } = await this.db.transaction(async (em) => {
       const document = await readyDocument(em, id);
       const { roundId, code, name } = await em.findOneByOrFail(Candidate, { id: document.candidateId });
       const data = { fileName: document.fileName, detail: `${code} ${name}` };
       await this.audit.record(em, 'document.opened', { roundId, objectId: id, data });
       return document;
     });
-    return { url: await this.storage.downloadLink({ key: documentKey(id), fileName, contentType }) };
+    return { url: await this.storage.downloadLink({ key: documentKey(id, sha256), fileName, contentType }) };
   }
 }
 
+type ReadyDocument = Document & { sha256: string };
+
 /** A document that is still expected cannot be opened or attached: it is not there yet. */
-async function readyDocument(em: EntityManager, id: string): Promise<Document> {
+async function readyDocument(em: EntityManager, id: string): Promise<ReadyDocument> {
   const document = await findOrThrow(em, Document, 'document', id);
-  if (document.state !== DocumentState.READY) throw new NotFoundError('document', id);
+  if (!isReady(document)) throw new NotFoundError('document', id);
   return document;
+}
+
+function isReady(document: Document): document is ReadyDocument {
+  return document.state === DocumentState.READY && document.sha256 !== null;
 }

@@ -1,7 +1,8 @@
+import { randomUUID } from 'node:crypto';
 import { Injectable, Logger } from '@nestjs/common';
 import { AuditService } from '../audit/audit.service.js';
 import { CandidatesService } from '../candidates/candidates.service.js';
-import { documentKey, slotKey } from '../storage/storage-keys.js';
+import { checkKey, documentKey, slotKey } from '../storage/storage-keys.js';
 import { StorageService } from '../storage/storage.service.js';
 import { findOrThrow } from '../tenancy/find-or-throw.js';
 import { currentMembershipId } from '../tenancy/request-context.js';
@@ -44,7 +45,7 @@ export class UploadsService {
     const inspection = await this.takeOver(document);
     if ('refusal' in inspection) return this.refuse(document, inspection.refusal);
     const kept = await this.markReady(document, inspection.sha256);
-    await this.emptySlot(documentId);
+    await this.tidy(slotKey(documentId));
     return kept;
   }
 
@@ -67,15 +68,26 @@ export class UploadsService {
   }
 
   /** Copies first and looks at the copy: the slot could still be written to while it is read. */
-  private async takeOver({ id, fileName, contentType, sizeBytes }: Document): Promise<Inspection> {
+  private async takeOver(document: Document): Promise<Inspection> {
+    const copy = checkKey(document.id, randomUUID());
+    const inspection = await this.inspect(document, copy);
+    if ('sha256' in inspection) await this.storage.copy(copy, documentKey(document.id, inspection.sha256));
+    await this.tidy(copy);
+    return inspection;
+  }
+
+  private async inspect(
+    { id, fileName, contentType, sizeBytes }: Document,
+    copy: string,
+  ): Promise<Inspection> {
     const arrived = await this.storage.sizeOf(slotKey(id));
     if (arrived === null) return { refusal: nothingArrived(fileName) };
     if (arrived !== sizeBytes || arrived > LARGEST_FILE_BYTES) return { refusal: wrongSize(fileName) };
-    const isCopied = await this.storage.copy(slotKey(id), documentKey(id));
+    const isCopied = await this.storage.copy(slotKey(id), copy);
     if (!isCopied) return { refusal: nothingArrived(fileName) };
-    const copied = await this.storage.sizeOf(documentKey(id));
+    const copied = await this.storage.sizeOf(copy);
     if (copied !== sizeBytes) return { refusal: wrongSize(fileName) };
-    const bytes = await this.storage.read(documentKey(id));
+    const bytes = await this.storage.read(copy);
     if (!(await isContentOf(bytes, contentType))) return { refusal: wrongContent(fileName) };
     return { sha256: sha256Of(bytes) };
   }
@@ -95,16 +107,14 @@ export class UploadsService {
     });
   }
 
-  /** What is kept stays kept, even if the store no longer answers. */
-  private async emptySlot(documentId: string): Promise<void> {
-    await this.storage
-      .delete(slotKey(documentId))
-      .catch(() => this.log.warn(`the slot of document ${documentId} could not be emptied`));
+  /** What was decided stands, even if the store no longer answers. */
+  private async tidy(key: string): Promise<void> {
+    await this.storage.delete(key).catch(() => this.log.warn(`${key} could not be removed`));
   }
 
   /**
-   * The row goes first: an object without a row cannot be reached, a row without an object would be a promise. Without
-   * a row to remove, the same upload was finished meanwhile by another request, and its answer stands.
+   * The row goes first, because nobody reaches an object without one. Without a row to remove, the same upload was
+   * finished meanwhile by another request, and its answer stands.
    */
   private async refuse({ id }: Document, refusal: string): Promise<Document | UploadRefused> {
     const finished = await this.db.transaction(async (em) => {
@@ -112,8 +122,7 @@ export class UploadsService {
       return affected ? null : findOrThrow(em, Document, 'document', id);
     });
     if (finished) return finished;
-    await this.storage.delete(slotKey(id));
-    await this.storage.delete(documentKey(id));
+    await this.tidy(slotKey(id));
     return new UploadRefused(refusal);
   }
 }

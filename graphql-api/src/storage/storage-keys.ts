@@ -5,7 +5,12 @@ export function slotKey(documentId: string): string {
   return `t/${currentCaller().organisationId}/slot/${documentId}`;
 }
 
-/** Where a checked file stays. No upload form was ever made for it, so nobody can replace it. */
-export function documentKey(documentId: string): string {
-  return `t/${currentCaller().organisationId}/documents/${documentId}`;
+/** Where one attempt to check the file looks at it: the slot could still be written to meanwhile. */
+export function checkKey(documentId: string, attempt: string): string {
+  return `t/${currentCaller().organisationId}/check/${documentId}/${attempt}`;
+}
+
+/** Where a checked file stays. The key names the content, so that nothing else can ever take its place. */
+export function documentKey(documentId: string, sha256: string): string {
+  return `t/${currentCaller().organisationId}/documents/${documentId}/${sha256}`;
 }
