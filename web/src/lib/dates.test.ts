@@ -1,6 +1,14 @@
 import { beforeEach, expect, test } from 'vitest';
 import { setConventions } from './conventions';
-import { daysUntil, formatDate, formatDayMonth, formatInstant, timeLeft, today } from './dates';
+import {
+  daysUntil,
+  formatDate,
+  formatDayMonth,
+  formatInstant,
+  formatInstantInFull,
+  timeLeft,
+  today,
+} from './dates';
 
 const spaced = (text: string) => text.replaceAll('\u00a0', ' ');
 
@@ -35,4 +43,5 @@ test('writes instants by how long ago they were', () => {
   expect(formatInstant(new Date(2026, 2, 17, 14, 10).toISOString(), now)).toBe('Today, 14:10');
   expect(spaced(formatInstant(new Date(2026, 2, 16, 9, 5).toISOString(), now))).toBe('Mon 16, 09:05');
   expect(spaced(formatInstant(new Date(2026, 1, 3, 9, 5).toISOString(), now))).toBe('3 Feb 2026, 09:05');
+  expect(spaced(formatInstantInFull(new Date(2026, 2, 17, 14, 10).toISOString()))).toBe('17 Mar 2026, 14:10');
 });

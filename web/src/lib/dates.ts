@@ -31,11 +31,17 @@ export function timeLeft(date: string, now: Date = new Date()): string {
 /** An instant in the reader's own zone: "Today, 14:10", "Mon 16, 09:30" within a week, else "30 Apr 2026, 14:10". */
 export function formatInstant(instant: string, now: Date = new Date()): string {
   const at = new Date(instant);
-  const clock = `${pad(at.getHours())}:${pad(at.getMinutes())}`;
+  const clock = clockOf(at);
   const age = Math.round((startOfDay(now) - startOfDay(at)) / DAY_MS);
   if (age === 0) return `Today, ${clock}`;
   if (age > 0 && age < 7) return `${weekday(at)}\u00a0${at.getDate()}, ${clock}`;
-  return `${at.getDate()}\u00a0${MONTHS[at.getMonth()]}\u00a0${at.getFullYear()}, ${clock}`;
+  return formatInstantInFull(instant);
+}
+
+/** The same for papers, which are read on other days too: always "30 Apr 2026, 14:10". */
+export function formatInstantInFull(instant: string): string {
+  const at = new Date(instant);
+  return `${at.getDate()}\u00a0${MONTHS[at.getMonth()]}\u00a0${at.getFullYear()}, ${clockOf(at)}`;
 }
 
 /** Today's calendar date in the group's zone, as `2026-04-30`. */
@@ -61,6 +67,10 @@ function startOfDay(at: Date): number {
 
 function weekday(at: Date): string {
   return ['Sun', 'Mon', 'Tue', 'Wed', 'Thu', 'Fri', 'Sat'][at.getDay()]!;
+}
+
+function clockOf(at: Date): string {
+  return `${pad(at.getHours())}:${pad(at.getMinutes())}`;
 }
 
 function pad(value: number): string {

@@ -1,5 +1,5 @@
 import styled from 'styled-components';
-import { formatInstant } from '../../lib/dates';
+import { formatInstantInFull } from '../../lib/dates';
 import { formatMoney } from '../../lib/money';
 import { Mark } from '../../ui/brand';
 import { Notice } from '../../ui/notice';
@@ -29,7 +29,7 @@ export function MemoPage({ selection, decisionDate, candidates }: MemoPageProps)
     <Paper>
       <Mark size={34} />
       <p className="muted small">
-        {`${memo.roundName} · memo ${memoCode(decisionDate, selection.number)} · prepared by ${submittedBy.name}, ${formatInstant(submittedAt)}`}
+        {`${memo.roundName} · memo ${memoCode(decisionDate, selection.number)} · prepared by ${submittedBy.name}, ${formatInstantInFull(submittedAt)}`}
         <State tone={STATE_TONES[state]}>{DECISION_WORDS[state]}</State>
       </p>
       <h1>Purchase of equipment</h1>

@@ -1,5 +1,5 @@
 import styled from 'styled-components';
-import { formatInstant } from '../../lib/dates';
+import { formatInstantInFull } from '../../lib/dates';
 import { DECISION_WORDS } from './selection-words';
 import type { SelectionMemo } from './selection-memo';
 
@@ -8,9 +8,9 @@ export function MemoSignatures({ selection }: { selection: SelectionMemo }) {
   const { submittedBy, submittedAt, decidedBy, decidedAt, state } = selection;
   return (
     <Foot>
-      <Signature when={formatInstant(submittedAt)} name={submittedBy.name} part="Prepared by" />
+      <Signature when={formatInstantInFull(submittedAt)} name={submittedBy.name} part="Prepared by" />
       <Signature
-        when={decidedAt ? `${DECISION_WORDS[state]} ${formatInstant(decidedAt)}` : '\u00a0'}
+        when={decidedAt ? `${DECISION_WORDS[state]} ${formatInstantInFull(decidedAt)}` : '\u00a0'}
         name={decidedBy?.name ?? '\u00a0'}
         part="Finance director"
       />
