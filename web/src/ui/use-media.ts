@@ -13,7 +13,7 @@ export function useMedia(query: string): boolean {
   return useSyncExternalStore(subscribe, () => window.matchMedia(query).matches);
 }
 
-/** One column: below 768 px. */
+/** One column: a screen below 768 px. What such a screen folds away is printed all the same. */
 export function useNarrow(): boolean {
-  return useMedia('(max-width: 767px)');
+  return useMedia('screen and (max-width: 767px)');
 }

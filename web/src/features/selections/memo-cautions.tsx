@@ -29,4 +29,10 @@ const List = styled.ul`
     margin-top: 2px;
     color: var(--mw-caution);
   }
+  @media print {
+    li {
+      padding: 3px 0;
+      font-size: 9pt;
+    }
+  }
 `;

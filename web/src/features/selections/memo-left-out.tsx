@@ -33,6 +33,15 @@ const List = styled.ul`
     color: var(--mw-ink-2);
     white-space: nowrap;
   }
+  @media print {
+    li {
+      padding: 1px 0;
+      font-size: 9pt;
+    }
+    small {
+      font-size: inherit;
+    }
+  }
   @media (max-width: 767px) {
     li {
       grid-template-columns: minmax(0, 1fr);

@@ -69,4 +69,9 @@ const Fold = styled.details`
   &[open] summary::after {
     rotate: 225deg;
   }
+  @media print {
+    &::details-content {
+      content-visibility: visible;
+    }
+  }
 `;
