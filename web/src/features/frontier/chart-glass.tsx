@@ -13,6 +13,9 @@ import { points } from './wording';
 /** How many times larger the glass may show what lies around A, the best first. */
 const POWERS = [5, 4, 3];
 
+/** Narrower glasses leave no room for "Around A" beside the plumb line. */
+const WORDS_WIDTH = 260;
+
 interface ChartGlassProps {
   geometry: Geometry;
   glass: Box;
@@ -75,7 +78,8 @@ export function ChartGlass({ geometry, glass, portfolios, selected, bound, atMos
         textAnchor="end"
         className="note halo"
       >
-        Around A, {power} times larger
+        {glass.width < WORDS_WIDTH ? '' : 'Around A, '}
+        {power} times larger
       </text>
       <Brackets box={glass} length={13} />
       <Brackets box={seen} length={6} />
