@@ -101,3 +101,12 @@ test('tells a member whose role has no page in the round whom to turn to', async
   expect(await screen.findByRole('heading', { name: 'Your role has no page in this round' })).toBeVisible();
   expect(screen.getByText('Round 2027 is under way.')).toBeVisible();
 });
+
+test('calls scores and quotes open only while they can still be given', async () => {
+  const counts = { ...aRound().counts, scoresMissing: 13 };
+  const rounds = [aRound({ stage: 'DECIDE', counts })];
+  await renderRoute(limits, fakeLink({ Viewer: { viewer: aViewer({ rounds }) } }));
+  const nav = await screen.findByRole('navigation', { name: 'Main' });
+  expect(within(nav).getByRole('link', { name: /Scoring/ })).not.toHaveTextContent('open');
+  expect(within(nav).getByRole('link', { name: /Quotes/ })).not.toHaveTextContent('open');
+});

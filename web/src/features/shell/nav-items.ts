@@ -1,3 +1,4 @@
+import { canChangeContents } from '../../lib/can-change-contents';
 import { paths } from '../../lib/paths';
 import type { ViewerRound } from '../../lib/viewer';
 import type { IconName } from '../../ui/icon';
@@ -14,7 +15,7 @@ export interface NavItem {
 
 /** The pages of a round that `can` leaves in. What a role may not see is left out, not greyed. */
 export function roundItems(round: ViewerRound, can: (operation: string) => boolean): NavItem[] {
-  const { id, counts } = round;
+  const { id, stage, counts } = round;
   const items: (NavItem & { needs: string })[] = [
     { to: paths.overview(id), name: 'Overview', icon: 'rod', needs: 'roundOverview' },
     {
@@ -28,7 +29,7 @@ export function roundItems(round: ViewerRound, can: (operation: string) => boole
       to: paths.quotes(id),
       name: 'Quotes',
       icon: 'doc',
-      ...openCount(counts.quotesToSettle),
+      ...openCount(canChangeContents(stage) ? counts.quotesToSettle : 0),
       needs: 'quotes',
     },
     { to: paths.limits(id), name: 'Limits', icon: 'limit', needs: 'round' },
@@ -36,7 +37,7 @@ export function roundItems(round: ViewerRound, can: (operation: string) => boole
       to: paths.scoring(id),
       name: 'Scoring',
       icon: 'score',
-      ...openCount(counts.scoresMissing),
+      ...openCount(stage === 'SCORE' ? counts.scoresMissing : 0),
       needs: 'scoreSheet',
     },
     { to: paths.frontier(id), name: 'Frontier', icon: 'frontier', needs: 'run' },
