@@ -1,6 +1,7 @@
 import { useState } from 'react';
 import type { Ref } from 'react';
 import { TextAreaField } from '../../ui/field';
+import { useNarrow } from '../../ui/use-media';
 import type { OwnScore } from './use-own-scores';
 
 interface ScoreReasonProps {
@@ -12,6 +13,7 @@ interface ScoreReasonProps {
 
 /** Why the assessor gave a score. A score comes first. */
 export function ScoreReason({ score, onReason, reasonRef }: ScoreReasonProps) {
+  const narrow = useNarrow();
   const [reason, setReason] = useState(score?.reason ?? '');
   return (
     <TextAreaField
@@ -24,6 +26,7 @@ export function ScoreReason({ score, onReason, reasonRef }: ScoreReasonProps) {
       }
       value={reason}
       maxLength={2000}
+      rows={narrow ? 1 : 3}
       disabled={!score}
       onChange={(event) => setReason(event.target.value)}
       onBlur={() => score && reason !== score.reason && onReason(reason)}
