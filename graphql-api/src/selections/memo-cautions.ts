@@ -1,4 +1,4 @@
-import { dayInWords } from '../common/words.js';
+import { dayInWords, figureInWords } from '../common/words.js';
 import { chosenOf, type MemoSource } from './memo-source.js';
 import type { LimitUse } from './memo-limit-uses.js';
 import type { MemoCaution } from './models/memo.model.js';
@@ -57,7 +57,7 @@ function limitsNearlyUsed(uses: readonly LimitUse[]): MemoCaution[] {
     .filter(({ share }) => share !== undefined && share >= NEARLY_USED)
     .map(({ name, share, used, most }) => ({
       title: `${name}: ${Math.floor((share ?? 0) * 100)} % used`,
-      text: `${used} of ${most}. There is hardly room for anything unforeseen.`,
+      text: `${figureInWords(used)} of ${figureInWords(most ?? '0')}. There is hardly room for anything unforeseen.`,
     }));
 }
 
