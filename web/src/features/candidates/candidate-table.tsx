@@ -181,7 +181,7 @@ const Name = styled(Link)`
 
 const Vendor = styled.span`
   display: block;
-  max-width: 142px;
+  max-width: 84px;
   overflow: hidden;
   text-overflow: ellipsis;
 `;
