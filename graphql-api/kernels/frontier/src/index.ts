@@ -1,5 +1,5 @@
-export { canonicalText } from './canonical-text.js';
-export { explainInfeasible, type WriteFigure } from './explain-infeasible.js';
+export { canonicalText } from './problem/canonical-text.js';
+export { explainInfeasible, type WriteFigure } from './explain/explain-infeasible.js';
 export {
   describeViolation,
   totalsOf,
@@ -7,20 +7,20 @@ export {
   type Picks,
   type Totals,
   type Violation,
-} from './feasible.js';
+} from './problem/feasible.js';
 export {
   toFrontierDocument,
   type Certificate,
   type FrontierDocument,
   type RunFacts,
-} from './frontier-document.js';
-export { hypervolume } from './hypervolume.js';
-export { kneeOf } from './knee.js';
-export { ParetoFront } from './pareto-front.js';
-export { parseProblem } from './parse-problem.js';
-export { ProblemError } from './problem-error.js';
-export { PROBLEM_FORMAT, type Count, type Item, type Limit, type Problem } from './problem.js';
-export { Random } from './random.js';
+} from './result/frontier-document.js';
+export { hypervolume } from './archive/hypervolume.js';
+export { kneeOf } from './archive/knee.js';
+export { ParetoFront } from './archive/pareto-front.js';
+export { parseProblem } from './problem/parse-problem.js';
+export { ProblemError } from './problem/problem-error.js';
+export { PROBLEM_FORMAT, type Count, type Item, type Limit, type Problem } from './problem/problem.js';
+export { Random } from './local-search/random.js';
 export {
   searchFrontier,
   type FrontierPoint,

@@ -1,13 +1,13 @@
-import { explainInfeasible } from './explain-infeasible.js';
-import type { Picks } from './feasible.js';
-import { LocalSearch } from './local-search.js';
-import { compileModel } from './compile-model.js';
-import type { Model } from './model.js';
-import type { ParetoFront } from './pareto-front.js';
-import { ProblemError } from './problem-error.js';
-import type { Problem } from './problem.js';
-import type { SearchArchive } from './search-archive.js';
-import { picksOf } from './working-portfolio.js';
+import { explainInfeasible } from './explain/explain-infeasible.js';
+import type { Picks } from './problem/feasible.js';
+import { LocalSearch } from './local-search/local-search.js';
+import { compileModel } from './model/compile-model.js';
+import type { Model } from './model/model.js';
+import type { ParetoFront } from './archive/pareto-front.js';
+import { ProblemError } from './problem/problem-error.js';
+import type { Problem } from './problem/problem.js';
+import type { SearchArchive } from './archive/search-archive.js';
+import { picksOf } from './model/working-portfolio.js';
 
 export interface SearchSettings {
   /** The same problem and settings give the same result, whenever and wherever. 1 if left out. */

@@ -1,5 +1,5 @@
-import { violationsOf, type Picks } from '../src/feasible.js';
-import type { Problem } from '../src/problem.js';
+import { violationsOf, type Picks } from '../src/problem/feasible.js';
+import type { Problem } from '../src/problem/problem.js';
 
 export type Point = [cost: number, benefit: number];
 

@@ -1,5 +1,5 @@
-import { violationsOf } from '../src/feasible.js';
-import { parseProblem } from '../src/parse-problem.js';
+import { violationsOf } from '../src/problem/feasible.js';
+import { parseProblem } from '../src/problem/parse-problem.js';
 import { bruteForceFront } from './brute-force.js';
 import exactFront from './demo-exact-front.json' with { type: 'json' };
 import demoProblems from './demo-problems.json' with { type: 'json' };

@@ -1,4 +1,4 @@
-import type { Problem } from '../src/problem.js';
+import type { Problem } from '../src/problem/problem.js';
 
 /** The example of the format's own description, every kind of link in it. */
 export function twoNeedsAndAHoist(): Problem {

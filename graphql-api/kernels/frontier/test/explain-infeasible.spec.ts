@@ -1,5 +1,5 @@
-import { explainInfeasible } from '../src/explain-infeasible.js';
-import type { Problem } from '../src/problem.js';
+import { explainInfeasible } from '../src/explain/explain-infeasible.js';
+import type { Problem } from '../src/problem/problem.js';
 import { aProblem, twoNeedsAndAHoist } from './examples.js';
 import { runToEnd } from './run-search.js';
 

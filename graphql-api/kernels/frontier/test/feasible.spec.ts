@@ -1,5 +1,5 @@
-import { describeViolation, totalsOf, violationsOf, type Picks } from '../src/feasible.js';
-import type { Problem } from '../src/problem.js';
+import { describeViolation, totalsOf, violationsOf, type Picks } from '../src/problem/feasible.js';
+import type { Problem } from '../src/problem/problem.js';
 import { aProblem, twoNeedsAndAHoist } from './examples.js';
 
 describe('the check of a portfolio', () => {

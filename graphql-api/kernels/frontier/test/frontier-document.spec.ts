@@ -1,6 +1,6 @@
-import { toFrontierDocument } from '../src/frontier-document.js';
-import { hypervolume } from '../src/hypervolume.js';
-import { kneeOf } from '../src/knee.js';
+import { toFrontierDocument } from '../src/result/frontier-document.js';
+import { hypervolume } from '../src/archive/hypervolume.js';
+import { kneeOf } from '../src/archive/knee.js';
 import { searchFrontier } from '../src/search.js';
 import { aProblem, TWO_NEEDS_AND_A_HOIST_FRONT, twoNeedsAndAHoist } from './examples.js';
 import { runToEnd } from './run-search.js';

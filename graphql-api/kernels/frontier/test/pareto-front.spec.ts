@@ -1,5 +1,5 @@
-import { ParetoFront } from '../src/pareto-front.js';
-import { Random } from '../src/random.js';
+import { ParetoFront } from '../src/archive/pareto-front.js';
+import { Random } from '../src/local-search/random.js';
 
 const choices = (figure: number): Int32Array => Int32Array.of(figure, -figure);
 

@@ -1,6 +1,6 @@
-import { canonicalText } from '../src/canonical-text.js';
-import { parseProblem } from '../src/parse-problem.js';
-import { ProblemError } from '../src/problem-error.js';
+import { canonicalText } from '../src/problem/canonical-text.js';
+import { parseProblem } from '../src/problem/parse-problem.js';
+import { ProblemError } from '../src/problem/problem-error.js';
 import { aProblem, twoNeedsAndAHoist } from './examples.js';
 
 const withItem = (item: object): object => ({ format: 'metewand-problem/1', items: [item] });

@@ -1,4 +1,4 @@
-import type { Problem } from '../src/problem.js';
+import type { Problem } from '../src/problem/problem.js';
 import { bruteForceFront } from './brute-force.js';
 import { LIMITED_SELECTIONS, LORIE_SAVAGE, type PublishedCase } from './published-data.js';
 import { pointsOf, runToEnd } from './run-search.js';

@@ -1,5 +1,5 @@
-import { totalsOf, violationsOf } from '../src/feasible.js';
-import { parseProblem } from '../src/parse-problem.js';
+import { totalsOf, violationsOf } from '../src/problem/feasible.js';
+import { parseProblem } from '../src/problem/parse-problem.js';
 import { bruteForceFront } from './brute-force.js';
 import { pointsOf, runToEnd } from './run-search.js';
 import { aRandomProblem } from './seeded.js';

@@ -1,4 +1,4 @@
-import type { Problem } from '../src/problem.js';
+import type { Problem } from '../src/problem/problem.js';
 import {
   searchFrontier,
   type SearchProgress,

@@ -1,8 +1,8 @@
-import { ProblemError } from '../src/problem-error.js';
+import { ProblemError } from '../src/problem/problem-error.js';
 import { searchFrontier } from '../src/search.js';
-import { violationsOf } from '../src/feasible.js';
+import { violationsOf } from '../src/problem/feasible.js';
 import demoProblems from './demo-problems.json' with { type: 'json' };
-import { parseProblem } from '../src/parse-problem.js';
+import { parseProblem } from '../src/problem/parse-problem.js';
 import { aProblem, TWO_NEEDS_AND_A_HOIST_FRONT, twoNeedsAndAHoist } from './examples.js';
 import { pointsOf, runToEnd } from './run-search.js';
 import { aRandomProblem } from './seeded.js';

@@ -1,5 +1,5 @@
-import type { Problem, Item } from '../src/problem.js';
-import { Random } from '../src/random.js';
+import type { Problem, Item } from '../src/problem/problem.js';
+import { Random } from '../src/local-search/random.js';
 
 /** A problem with every kind of limit and link in it, drawn from a seed; some have no feasible portfolio. */
 export function aRandomProblem(seed: number, itemCount: number): Problem {

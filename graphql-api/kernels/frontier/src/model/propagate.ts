@@ -1,5 +1,5 @@
-import { needName } from './feasible.js';
-import type { Item, Problem } from './problem.js';
+import { needName } from '../problem/feasible.js';
+import type { Item, Problem } from '../problem/problem.js';
 
 /** What follows from the mandatory items, the left out ones and the links before any choice is made. */
 export interface Settled {

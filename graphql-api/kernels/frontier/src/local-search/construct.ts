@@ -1,5 +1,5 @@
-import type { Model } from './model.js';
-import type { WorkingPortfolio } from './working-portfolio.js';
+import type { Model } from '../model/model.js';
+import type { WorkingPortfolio } from '../model/working-portfolio.js';
 
 /** What a greedy start weighs: benefit against a price for cost, and limits at a share of that price. */
 export interface StartWeights {

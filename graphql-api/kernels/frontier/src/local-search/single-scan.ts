@@ -1,7 +1,7 @@
 import { BestMoves } from './best-moves.js';
 import type { MoveList } from './move-list.js';
-import type { SearchArchive } from './search-archive.js';
-import type { WorkingPortfolio } from './working-portfolio.js';
+import type { SearchArchive } from '../archive/search-archive.js';
+import type { WorkingPortfolio } from '../model/working-portfolio.js';
 
 /**
  * Looks at every portfolio one change away and offers the feasible ones that no member beats. Returns the feasible

@@ -1,8 +1,8 @@
 import { BestMoves } from './best-moves.js';
 import type { MoveList } from './move-list.js';
-import type { SearchArchive } from './search-archive.js';
+import type { SearchArchive } from '../archive/search-archive.js';
 import { scanSingles } from './single-scan.js';
-import type { WorkingPortfolio } from './working-portfolio.js';
+import type { WorkingPortfolio } from '../model/working-portfolio.js';
 
 /**
  * Makes a portfolio feasible by single changes: each time those that take away most excess for the benefit they give

@@ -1,14 +1,14 @@
 import { CombinationScan, leastLoss } from './combination-scan.js';
 import { chooseGreedily, startWeights, type StartWeights } from './construct.js';
-import { describeViolation, violationsOf } from './feasible.js';
-import { Links } from './links.js';
-import type { Model } from './model.js';
+import { describeViolation, violationsOf } from '../problem/feasible.js';
+import { Links } from '../model/links.js';
+import type { Model } from '../model/model.js';
 import { MoveList } from './move-list.js';
 import { Random } from './random.js';
-import { SearchArchive } from './search-archive.js';
+import { SearchArchive } from '../archive/search-archive.js';
 import { improve, repair } from './settle.js';
 import { scanSingles } from './single-scan.js';
-import { picksOf, WorkingPortfolio } from './working-portfolio.js';
+import { picksOf, WorkingPortfolio } from '../model/working-portfolio.js';
 
 /**
  * Local search over a front with neighbourhoods of growing size (variable neighbourhood search; Mladenović and Hansen

@@ -1,6 +1,6 @@
 import type { MoveList } from './move-list.js';
-import type { SearchArchive } from './search-archive.js';
-import type { WorkingPortfolio } from './working-portfolio.js';
+import type { SearchArchive } from '../archive/search-archive.js';
+import type { WorkingPortfolio } from '../model/working-portfolio.js';
 
 /**
  * Looks at every portfolio that so many changes of a selection of moves lead to, in order of the selection. It can be

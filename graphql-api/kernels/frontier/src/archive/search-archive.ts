@@ -1,7 +1,7 @@
 import { EvenSample } from './even-sample.js';
 import { ParetoFront } from './pareto-front.js';
-import type { Model } from './model.js';
-import type { WorkingPortfolio } from './working-portfolio.js';
+import type { Model } from '../model/model.js';
+import type { WorkingPortfolio } from '../model/working-portfolio.js';
 
 /**
  * What a search has found: the front, how many portfolios were looked at, and samples of those for the chart. It

@@ -1,6 +1,6 @@
-import { countName, needName } from './feasible.js';
+import { countName, needName } from '../problem/feasible.js';
 import type { Model, OptionList, Row } from './model.js';
-import type { Item, Problem } from './problem.js';
+import type { Item, Problem } from '../problem/problem.js';
 
 type CompiledRows = Pick<Model, 'rows' | 'rowMost' | 'rowWeight' | 'termStart' | 'termRow' | 'termValue'>;
 

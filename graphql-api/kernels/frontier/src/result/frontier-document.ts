@@ -1,6 +1,6 @@
-import { hypervolume } from './hypervolume.js';
-import type { Problem } from './problem.js';
-import type { FrontierPoint, SearchResult } from './search.js';
+import { hypervolume } from '../archive/hypervolume.js';
+import type { Problem } from '../problem/problem.js';
+import type { FrontierPoint, SearchResult } from '../search.js';
 
 /** A search's outcome, format `metewand-frontier/1`. */
 export interface FrontierDocument {

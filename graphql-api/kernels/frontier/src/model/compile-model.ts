@@ -1,5 +1,5 @@
 import type { Model, OptionList } from './model.js';
-import type { Problem } from './problem.js';
+import type { Problem } from '../problem/problem.js';
 import { compileRows } from './rows.js';
 
 /**

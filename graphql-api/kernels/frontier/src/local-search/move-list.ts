@@ -1,5 +1,5 @@
-import type { Links } from './links.js';
-import type { WorkingPortfolio } from './working-portfolio.js';
+import type { Links } from '../model/links.js';
+import type { WorkingPortfolio } from '../model/working-portfolio.js';
 
 /**
  * Every single change of one portfolio with what it does to benefit and cost, laid out for the scan of combinations.

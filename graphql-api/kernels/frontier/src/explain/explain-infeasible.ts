@@ -1,6 +1,6 @@
-import { countName } from './feasible.js';
-import { propagate, type Settled } from './propagate.js';
-import type { Item, Problem } from './problem.js';
+import { countName } from '../problem/feasible.js';
+import { propagate, type Settled } from '../model/propagate.js';
+import type { Item, Problem } from '../problem/problem.js';
 
 /** Writes a figure for a person: whole numbers are in the units of whoever wrote the problem. Pieces are not asked. */
 export type WriteFigure = (figure: number, of: 'cost' | 'benefit' | { readonly limit: string }) => string;

@@ -1,5 +1,5 @@
-import type { Violation } from './feasible.js';
-import type { Problem } from './problem.js';
+import type { Violation } from '../problem/feasible.js';
+import type { Problem } from '../problem/problem.js';
 
 /**
  * A problem laid out for search. Its items fall into classes, of each of which exactly one option is chosen: a
