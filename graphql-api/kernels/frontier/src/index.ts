@@ -1,5 +1,6 @@
 export { canonicalText } from './problem/canonical-text.js';
-export { explainInfeasible, type WriteFigure } from './explain/explain-infeasible.js';
+export { explainInfeasible } from './explain/explain-infeasible.js';
+export type { WriteFigure } from './explain/write-figure.js';
 export {
   describeViolation,
   totalsOf,

@@ -1,9 +1,7 @@
 import { countName } from '../problem/feasible.js';
 import { propagate, type Settled } from '../model/propagate.js';
 import type { Item, Problem } from '../problem/problem.js';
-
-/** Writes a figure for a person: whole numbers are in the units of whoever wrote the problem. Pieces are not asked. */
-export type WriteFigure = (figure: number, of: 'cost' | 'benefit' | { readonly limit: string }) => string;
+import type { WriteFigure } from './write-figure.js';
 
 /**
  * Why no portfolio can keep every limit and link, one sentence per reason with the names of what collides and by how

@@ -1,10 +1,15 @@
 import { needName } from '../problem/feasible.js';
+import { groupsOf } from '../problem/groups.js';
 import type { Item, Problem } from '../problem/problem.js';
 
 /** What follows from the mandatory items, the left out ones and the links before any choice is made. */
 export interface Settled {
   /** Items that every feasible portfolio takes. */
   readonly forced: ReadonlySet<string>;
+  /** Why an item is in: a clause without its full stop, for each forced item. */
+  readonly whyForced: ReadonlyMap<string, string>;
+  /** Why an item is out: the same for each item that no feasible portfolio takes. */
+  readonly whyBarred: ReadonlyMap<string, string>;
   /** Items that may be taken, by group: of each at most one is. */
   readonly groups: readonly (readonly Item[])[];
   /** Sentences on links that cannot all be kept; if there are any, no portfolio is feasible. */
@@ -25,7 +30,8 @@ export function propagate(problem: Problem): Settled {
     for (const exclusion of exclusions) collisions.push(...barOthers(exclusion, forced, barred));
     for (const item of problem.items) collisions.push(...followNeeds(item, forced, barred));
   }
-  return { forced: new Set(forced.keys()), groups: groupsOf(problem, barred), collisions };
+  const groups = groupsOf(problem.items.filter(({ id }) => !barred.has(id)));
+  return { forced: new Set(forced.keys()), whyForced: forced, whyBarred: barred, groups, collisions };
 }
 
 type Reasons = Map<string, string>;
@@ -75,14 +81,4 @@ function followNeeds({ id, needs = [] }: Item, forced: Reasons, barred: Reasons)
     }
   }
   return [];
-}
-
-function groupsOf(problem: Problem, barred: Reasons): Item[][] {
-  const groups = new Map<string, Item[]>();
-  for (const item of problem.items) {
-    if (barred.has(item.id)) continue;
-    const key = item.oneOf === undefined ? `item ${item.id}` : `group ${item.oneOf}`;
-    groups.set(key, [...(groups.get(key) ?? []), item]);
-  }
-  return [...groups.values()];
 }
