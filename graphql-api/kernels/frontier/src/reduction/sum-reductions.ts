@@ -12,11 +12,15 @@ import type { Overrun, Reduction } from './reduction.js';
  */
 export function sumReductions(problem: Problem): Reduction[] | undefined {
   const groups = openGroupsOf(problem);
+  const groupOf = new Map(groups.flatMap((group) => group.items.map((item) => [item, group])));
   const companions = companionsOf(problem);
+  const mostTogether = [...companions.values()].reduce((most, items) => Math.max(most, items.length), 1);
   const found = new Map<string, Reduction>();
   for (const sum of boundedSumsOf(problem)) {
-    const lowest = new LowestSum(sum, groups);
+    const lowest = new LowestSum(sum, groups, groupOf);
     if (lowest.total > sum.most) return undefined;
+    // most sums have room for anything: one look spares the look at each item
+    if (lowest.total + lowest.greatestRise * mostTogether <= sum.most) continue;
     for (const group of groups) {
       for (const item of group.items) {
         if (found.has(item.id)) continue;
@@ -30,6 +34,7 @@ export function sumReductions(problem: Problem): Reduction[] | undefined {
 
 /** The items of a group that may still be taken; `forced` is the one that must be. */
 interface Group {
+  readonly place: number;
   readonly items: readonly Item[];
   readonly forced: Item | undefined;
 }
@@ -60,27 +65,41 @@ function settle(
 
 /** The least a sum can come to when the groups are all that is kept. */
 class LowestSum {
-  private readonly ofGroup: ReadonlyMap<Group, number>;
-  private readonly groupOf = new Map<Item, Group>();
+  private readonly ofGroup: Float64Array;
   readonly total: number;
+  /** The most by which choosing otherwise in one group can raise the sum. */
+  readonly greatestRise: number;
 
   constructor(
     readonly sum: BoundedSum,
     groups: readonly Group[],
+    private readonly groupOf: ReadonlyMap<Item, Group>,
   ) {
-    this.ofGroup = new Map(groups.map((group) => [group, this.lowestOf(group)]));
-    for (const group of groups) for (const item of group.items) this.groupOf.set(item, group);
-    this.total = [...this.ofGroup.values()].reduce((total, lowest) => total + lowest, 0);
+    const ofGroup = new Float64Array(groups.length);
+    let [total, greatestRise] = [0, 0];
+    for (const group of groups) {
+      const lowest = this.lowestOf(group);
+      let highest = 0;
+      for (const item of group.items) {
+        highest = Math.max(highest, sum.figure(item) * (item.most ?? 1));
+      }
+      ofGroup[group.place] = lowest;
+      total += lowest;
+      greatestRise = Math.max(greatestRise, highest - lowest);
+    }
+    this.ofGroup = ofGroup;
+    this.total = total;
+    this.greatestRise = greatestRise;
   }
 
   beside(group: Group): number {
-    return this.total - this.ofGroup.get(group)!;
+    return this.total - this.ofGroup[group.place];
   }
 
   /** At least one piece of each of the items, no two of which are of one group. */
   with(items: readonly Item[]): number {
     let lowest = this.total;
-    for (const item of items) lowest += this.lowestWith(item) - this.ofGroup.get(this.groupOf.get(item)!)!;
+    for (const item of items) lowest += this.lowestWith(item) - this.ofGroup[this.groupOf.get(item)!.place];
     return lowest;
   }
 
@@ -121,7 +140,8 @@ function companionsOf(problem: Problem): Map<Item, readonly Item[]> {
 function openGroupsOf(problem: Problem): Group[] {
   const leftOut = new Set(problem.leaveOut);
   const mandatory = new Set(problem.mustInclude);
-  return groupsOf(problem.items.filter(({ id }) => !leftOut.has(id))).map((items) => ({
+  return groupsOf(problem.items.filter(({ id }) => !leftOut.has(id))).map((items, place) => ({
+    place,
     items,
     forced: items.find(({ id }) => mandatory.has(id)),
   }));
