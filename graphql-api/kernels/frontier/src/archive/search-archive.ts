@@ -31,7 +31,7 @@ export class SearchArchive {
   private beaten = 0;
 
   constructor(model: Model, lookedAtCapacity: number) {
-    this.front = new ParetoFront(model.classCount, (benefit, cost) => this.sampleBeaten(benefit, cost));
+    this.front = new ParetoFront(model.optionStart, (benefit, cost) => this.sampleBeaten(benefit, cost));
     this.lookedAt = new EvenSample(lookedAtCapacity);
     const range = costRange(model);
     this.leastCost = range.least;
