@@ -1,0 +1,421 @@
+import { LinearSystem } from './linear-system.js';
+import type { OpenPart } from './open-part.js';
+import { ScaledPart } from './scaled-part.js';
+
+/** Where to start from: prices of rows of the model and of cost, and options that were chosen in shares. */
+export interface KnownPrices {
+  priceOfRow(row: number): number;
+  readonly priceOfCost: number;
+  readonly inShares: ReadonlySet<number>;
+}
+
+/**
+ * The linear relaxation of a part: the most benefit if options could be chosen in shares, as a function of what may be
+ * spent. It is solved by its dual: a price for cost and one for each row are sought at which
+ *
+ *   prices × bounds + over all classes the most (benefit − prices × entries) among the class' options
+ *
+ * is least. At any prices of zero or more that sum is at least the benefit of every portfolio (weak duality), so a
+ * run cut short, or rounding, costs sharpness and never truth.
+ *
+ * The way down is the dual simplex method with classes as generalised upper bounds (Dantzig and Van Slyke 1967) and
+ * long steps; from memory. At a corner as many ties between options hold as there are free prices. The shares in which
+ * the tied options are chosen say which of them keeps the sum from falling; along that edge the sum is piecewise
+ * linear, and the step goes to its least point, past as many changes of a class' best option as it takes. The matrix
+ * has one row for each tie, a handful, and is factored anew at each corner: no error builds up.
+ */
+export class Relaxation {
+  /** Benefit per unit of each row of the part and, last, of cost. */
+  readonly prices: Float64Array;
+  /** The share in which each option is chosen. */
+  readonly shares: Float64Array;
+
+  private readonly scaled: ScaledPart;
+  private readonly classOf: Int32Array;
+  /** Scaled prices. One that is neither free nor zero is held where it is until a step moves it. */
+  private readonly price: Float64Array;
+  private readonly isFree: Uint8Array;
+  private readonly free: number[] = [];
+  /** The best option of each class at the prices, and options that are as good. */
+  private readonly best: Int32Array;
+  private readonly ties: number[] = [];
+  private readonly tiesInClass: Int32Array;
+
+  private readonly worth: Float64Array;
+  private readonly slope: Float64Array;
+  private readonly direction: Float64Array;
+  private readonly left: Float64Array;
+  private readonly nextBreak: Float64Array;
+  private readonly nextOption: Int32Array;
+  private readonly system = new LinearSystem();
+  private readonly right: Float64Array;
+  private readonly solution: Float64Array;
+
+  constructor(
+    private readonly part: OpenPart,
+    known?: KnownPrices,
+  ) {
+    const { classCount, start } = part;
+    const options = part.option.length;
+    const figures = part.row.length + 1;
+    this.scaled = new ScaledPart(part);
+    this.prices = new Float64Array(figures);
+    this.shares = new Float64Array(options);
+    this.price = new Float64Array(figures);
+    this.isFree = new Uint8Array(figures);
+    this.best = new Int32Array(classCount);
+    this.tiesInClass = new Int32Array(classCount);
+    this.classOf = new Int32Array(options);
+    for (let k = 0; k < classCount; k++) this.classOf.fill(k, start[k], start[k + 1]);
+    this.worth = new Float64Array(options);
+    this.slope = new Float64Array(options);
+    this.direction = new Float64Array(figures);
+    this.left = new Float64Array(figures);
+    this.nextBreak = new Float64Array(classCount);
+    this.nextOption = new Int32Array(classCount);
+    this.right = new Float64Array(figures);
+    this.solution = new Float64Array(figures);
+    this.startAt(known);
+  }
+
+  /**
+   * Finds the prices for portfolios that cost at most so much. False: there is none, not even in shares. It goes on
+   * from the prices of the last call, which for a nearby cost takes a few steps.
+   */
+  minimise(cost: number): boolean {
+    this.scaled.allowCost(cost);
+    const most = 100 + 4 * this.prices.length + this.part.classCount;
+    for (let step = 0; step < most; step++) {
+      this.settleCorner();
+      this.readShares();
+      const obstacle = this.worstObstacle();
+      if (obstacle === undefined) break;
+      if (obstacle.kind === 'best') {
+        this.takeAsBest(obstacle.tie);
+        continue;
+      }
+      if (this.walk(obstacle)) continue;
+      if (this.fallsForEver()) return false;
+      break;
+    }
+    for (let row = 0; row < this.prices.length; row++) {
+      this.prices[row] = this.scaled.priceOf(this.price[row], row);
+    }
+    return true;
+  }
+
+  private startAt(known: KnownPrices | undefined): void {
+    const { part, price, scaled } = this;
+    if (known) {
+      for (const [row, id] of part.row.entries())
+        price[row] = scaled.scaledPriceOf(known.priceOfRow(id), row);
+      price[part.row.length] = scaled.scaledPriceOf(known.priceOfCost, part.row.length);
+    }
+    this.readWorths();
+    for (let k = 0; k < part.classCount; k++) this.best[k] = this.bestOf(k);
+    if (!known) return;
+    for (let option = 0; option < part.option.length; option++) {
+      const best = this.best[this.classOf[option]];
+      if (option === best || !known.inShares.has(part.option[option])) continue;
+      if (this.worth[best] - this.worth[option] < TIE && this.ties.length < price.length) this.addTie(option);
+    }
+    for (let row = 0; row < price.length; row++) if (price[row] > 0) this.setFree(row);
+  }
+
+  private bestOf(k: number): number {
+    const { start } = this.part;
+    let best = start[k];
+    for (let option = best + 1; option < start[k + 1]; option++) {
+      if (this.worth[option] > this.worth[best]) best = option;
+    }
+    return best;
+  }
+
+  /** Factors the ties over the free prices, holding what is too much, and puts the prices where the ties meet. */
+  private settleCorner(): void {
+    const { system, ties, free } = this;
+    for (;;) {
+      this.layTies();
+      system.factor(SMALLEST_PIVOT);
+      if (system.rank === ties.length && system.rank === free.length) break;
+      const independentTies = Array.from(system.rowOrder.subarray(0, system.rank), (row) => ties[row]);
+      const independentPrices = Array.from(system.columnOrder.subarray(0, system.rank), (at) => free[at]);
+      for (const tie of [...ties]) if (!independentTies.includes(tie)) this.dropTie(tie);
+      for (const row of [...free]) if (!independentPrices.includes(row)) this.unsetFree(row);
+    }
+    this.meetTies();
+    this.readWorths();
+  }
+
+  private layTies(): void {
+    const { system, ties, free, scaled, best, classOf } = this;
+    system.reset(ties.length, free.length);
+    const entries = this.direction;
+    for (const [row, tie] of ties.entries()) {
+      entries.fill(0);
+      this.addEntries(entries, tie, 1);
+      this.addEntries(entries, best[classOf[tie]], -1);
+      for (const [column, figure] of free.entries()) system.set(row, column, entries[figure]);
+      this.right[row] = scaled.benefit[tie] - scaled.benefit[best[classOf[tie]]];
+      for (let figure = 0; figure < entries.length; figure++) {
+        if (this.isFree[figure] === 0) this.right[row] -= entries[figure] * this.price[figure];
+      }
+    }
+  }
+
+  private meetTies(): void {
+    if (this.ties.length === 0) return;
+    this.system.solve(this.right, this.solution);
+    for (const [column, figure] of this.free.entries())
+      this.price[figure] = Math.max(0, this.solution[column]);
+  }
+
+  private readWorths(): void {
+    const { worth, price, scaled } = this;
+    const { termStart, termRow, termValue } = scaled;
+    for (let option = 0; option < worth.length; option++) {
+      let sum = scaled.benefit[option];
+      for (let term = termStart[option]; term < termStart[option + 1]; term++) {
+        sum -= price[termRow[term]] * termValue[term];
+      }
+      worth[option] = sum;
+    }
+  }
+
+  /** The shares of the tied options that use up the rows with free prices, and what is left of each row. */
+  private readShares(): void {
+    const { part, shares, best, ties, free, left, system, right, solution, classOf } = this;
+    left.set(this.scaled.bound);
+    shares.fill(0);
+    for (let k = 0; k < part.classCount; k++) {
+      shares[best[k]] = 1;
+      this.addEntries(left, best[k], -1);
+    }
+    if (ties.length === 0) return;
+    for (const [column, figure] of free.entries()) right[column] = left[figure];
+    system.solveTransposed(right, solution);
+    for (const [row, tie] of ties.entries()) {
+      const share = solution[row];
+      const rival = best[classOf[tie]];
+      shares[tie] = share;
+      shares[rival] -= share;
+      this.addEntries(left, tie, -share);
+      this.addEntries(left, rival, share);
+    }
+  }
+
+  /** What is furthest from allowed: a share below nought, or a row that its price should be moved for. */
+  private worstObstacle(): Obstacle | undefined {
+    const { shares, ties, best, classOf, left, price, isFree } = this;
+    let worst: Obstacle | undefined;
+    let worstBy = ALLOWED;
+    for (const tie of ties) {
+      if (-shares[tie] > worstBy) {
+        worstBy = -shares[tie];
+        worst = { kind: 'tie', tie, rate: shares[tie] };
+      }
+      const rival = best[classOf[tie]];
+      if (-shares[rival] > worstBy) {
+        worstBy = -shares[rival];
+        worst = { kind: 'best', tie };
+      }
+    }
+    for (let row = 0; row < left.length; row++) {
+      if (isFree[row] === 1) continue;
+      const by = price[row] > 0 ? Math.abs(left[row]) : -left[row];
+      if (by <= worstBy) continue;
+      worstBy = by;
+      worst = { kind: 'row', row, sign: left[row] < 0 ? 1 : -1, rate: -by };
+    }
+    return worst;
+  }
+
+  /** Makes a tied option the best of its class, and the one that was best a tie: they are as good. */
+  private takeAsBest(tie: number): void {
+    const k = this.classOf[tie];
+    this.ties[this.ties.indexOf(tie)] = this.best[k];
+    this.best[k] = tie;
+  }
+
+  /** Goes along the edge that an obstacle opens, to the least point; false if there is none. */
+  private walk(obstacle: Step): boolean {
+    this.point(obstacle);
+    if (obstacle.kind === 'tie') this.dropTie(obstacle.tie);
+    const stop = this.leastPoint(obstacle.rate);
+    if (stop === undefined) return false;
+    const { price, direction } = this;
+    for (let row = 0; row < price.length; row++) {
+      if (direction[row] !== 0) price[row] = Math.max(0, price[row] + stop.distance * direction[row]);
+    }
+    if (stop.kind === 'zero') price[stop.row] = 0;
+    this.exchange(obstacle, stop);
+    return true;
+  }
+
+  /**
+   * Whether along the direction the sum falls without end, which no portfolio in shares could follow. Only a fall well
+   * beyond rounding counts: where the bounds can just be met, the sum is level in truth.
+   */
+  private fallsForEver(): boolean {
+    const { part, scaled, direction, slope } = this;
+    let fall = 0;
+    let size = 0;
+    const add = (term: number): void => {
+      fall += term;
+      size += Math.abs(term);
+    };
+    for (let row = 0; row < direction.length; row++) add(scaled.bound[row] * direction[row]);
+    for (let k = 0; k < part.classCount; k++) {
+      add(slope.subarray(part.start[k], part.start[k + 1]).reduce(larger, -Infinity));
+    }
+    return fall < -SURELY * size;
+  }
+
+  private exchange(obstacle: Step, stop: Stop): void {
+    if (stop.kind === 'tie') {
+      if (obstacle.kind === 'row') this.setFree(obstacle.row);
+      this.addTie(stop.option);
+      return;
+    }
+    if (obstacle.kind === 'tie') this.unsetFree(stop.row);
+    else if (stop.row !== obstacle.row) {
+      this.unsetFree(stop.row);
+      this.setFree(obstacle.row);
+    }
+  }
+
+  /** The direction of all prices in which one tie loosens, or one price moves, while the other ties hold. */
+  private point(obstacle: Step): void {
+    const { system, ties, free, right, solution, direction, best, classOf, scaled } = this;
+    for (const [row, tie] of ties.entries()) {
+      right[row] =
+        obstacle.kind === 'tie'
+          ? Number(tie === obstacle.tie)
+          : obstacle.sign *
+            (this.entryOf(best[classOf[tie]], obstacle.row) - this.entryOf(tie, obstacle.row));
+    }
+    direction.fill(0);
+    if (ties.length > 0) {
+      system.solve(right, solution);
+      for (const [column, figure] of free.entries()) direction[figure] = solution[column];
+    }
+    if (obstacle.kind === 'row') direction[obstacle.row] = obstacle.sign;
+    const { termStart, termRow, termValue } = scaled;
+    for (let option = 0; option < this.slope.length; option++) {
+      let sum = 0;
+      for (let term = termStart[option]; term < termStart[option + 1]; term++) {
+        sum -= direction[termRow[term]] * termValue[term];
+      }
+      this.slope[option] = sum;
+    }
+  }
+
+  private leastPoint(rate: number): Stop | undefined {
+    const { part, best, slope, nextBreak, nextOption, tiesInClass } = this;
+    const zero = this.firstZero();
+    for (let k = 0; k < part.classCount; k++) this.findBreak(k);
+    let slopeNow = rate;
+    for (;;) {
+      let k = -1;
+      let distance = zero?.distance ?? Infinity;
+      for (let other = 0; other < nextBreak.length; other++) {
+        if (nextBreak[other] >= distance) continue;
+        distance = nextBreak[other];
+        k = other;
+      }
+      if (k < 0) return zero;
+      const option = nextOption[k];
+      slopeNow += slope[option] - slope[best[k]];
+      // a class with ties cannot change its best option: the ties would be lost with it
+      if (slopeNow >= 0 || tiesInClass[k] > 0) return { kind: 'tie', option, distance };
+      best[k] = option;
+      this.findBreak(k);
+    }
+  }
+
+  /** Where the first price falls to zero. */
+  private firstZero(): Stop | undefined {
+    const { price, direction } = this;
+    let first: Stop | undefined;
+    for (let row = 0; row < price.length; row++) {
+      if (direction[row] >= -STILL) continue;
+      const distance = price[row] / -direction[row];
+      if (!first || distance < first.distance) first = { kind: 'zero', row, distance };
+    }
+    return first;
+  }
+
+  /** Where another option of a class overtakes the one that is best so far. */
+  private findBreak(k: number): void {
+    const { part, worth, slope, nextBreak, nextOption } = this;
+    const best = this.best[k];
+    nextBreak[k] = Infinity;
+    for (let option = part.start[k]; option < part.start[k + 1]; option++) {
+      const gain = slope[option] - slope[best];
+      if (gain <= STILL) continue;
+      const distance = Math.max(0, (worth[best] - worth[option]) / gain);
+      if (distance >= nextBreak[k]) continue;
+      nextBreak[k] = distance;
+      nextOption[k] = option;
+    }
+  }
+
+  private addEntries(sums: Float64Array, option: number, times: number): void {
+    const { termStart, termRow, termValue } = this.scaled;
+    for (let term = termStart[option]; term < termStart[option + 1]; term++) {
+      sums[termRow[term]] += times * termValue[term];
+    }
+  }
+
+  private entryOf(option: number, row: number): number {
+    const { termStart, termRow, termValue } = this.scaled;
+    for (let term = termStart[option]; term < termStart[option + 1]; term++) {
+      if (termRow[term] === row) return termValue[term];
+    }
+    return 0;
+  }
+
+  private addTie(option: number): void {
+    this.ties.push(option);
+    this.tiesInClass[this.classOf[option]]++;
+  }
+
+  private dropTie(option: number): void {
+    this.ties.splice(this.ties.indexOf(option), 1);
+    this.tiesInClass[this.classOf[option]]--;
+  }
+
+  private setFree(row: number): void {
+    this.free.push(row);
+    this.isFree[row] = 1;
+  }
+
+  private unsetFree(row: number): void {
+    this.free.splice(this.free.indexOf(row), 1);
+    this.isFree[row] = 0;
+  }
+}
+
+function larger(one: number, other: number): number {
+  return Math.max(one, other);
+}
+
+/** What can be moved: a tie loosened, or the price of a row changed. `rate`: how the sum changes at first. */
+type Step =
+  | { readonly kind: 'tie'; readonly tie: number; readonly rate: number }
+  | { readonly kind: 'row'; readonly row: number; readonly sign: 1 | -1; readonly rate: number };
+
+/** Or: the best option of a class has a share below nought, and first has to change places with this tie. */
+type Obstacle = Step | { readonly kind: 'best'; readonly tie: number };
+
+/** Where a walk ends: an option comes to tie with the best of its class, or a price falls to zero. */
+type Stop =
+  | { readonly kind: 'tie'; readonly option: number; readonly distance: number }
+  | { readonly kind: 'zero'; readonly row: number; readonly distance: number };
+
+/** All figures are near one: these tell a difference from rounding. */
+const SMALLEST_PIVOT = 1e-9;
+const ALLOWED = 1e-9;
+const STILL = 1e-12;
+const TIE = 1e-9;
+const SURELY = 1e-7;
