@@ -1,0 +1,151 @@
+import { narrow, type OpenPart } from '../relaxation/open-part.js';
+import { Relaxation, type KnownPrices } from '../relaxation/relaxation.js';
+import { branchAtFirst, branchAtOption } from './branching.js';
+import { Deviations } from './deviations.js';
+import { Enumeration } from './enumeration.js';
+import { lossesAt, type Losses } from './losses.js';
+import type { FoundPortfolio } from './proof-task.js';
+import type { Precision, StepLine, Stretch, Tangent } from './step-line.js';
+
+export interface NodeSettings {
+  readonly line: StepLine;
+  readonly found: FoundPortfolio[];
+  readonly precision: Precision;
+}
+
+/** What came of the work on a node: what is still open of it, and the effort in branches of an enumeration. */
+interface Outcome {
+  readonly children: OpenNode[];
+  readonly effort: number;
+}
+
+/**
+ * A part of the problem in a stretch of cost, with a tangent above it. Working on it closes it, or leaves parts of it
+ * open: halves of the stretch where the tangent strays too far from the relaxation for its gap, else the branches of
+ * an option that the relaxation chooses in shares.
+ */
+export class OpenNode {
+  constructor(
+    readonly part: OpenPart,
+    readonly tangent: Tangent,
+    private readonly known?: KnownPrices,
+  ) {}
+
+  /** The widest gap between the tangent and what is known; below nought if nothing is left to find. */
+  gap({ line, precision }: NodeSettings): number {
+    return line.widestGap(this.tangent, this.part, precision)?.gap ?? -1;
+  }
+
+  work(settings: NodeSettings): Outcome {
+    const { part, tangent } = this;
+    const { line, precision } = settings;
+    const open = line.widestGap(tangent, part, precision);
+    if (!open) return closed(0);
+    const relaxation = new Relaxation(part, this.known);
+    const middle = Math.floor((open.from + open.to) / 2);
+    if (!relaxation.minimise(middle)) {
+      if (middle === open.to || !relaxation.minimise(open.to)) return closed(RELAXATION);
+      const lower = { from: middle + 1, to: open.to };
+      const children = this.within(lower, everything(part), tangent, knownFrom(part, relaxation));
+      return { children, effort: 2 * RELAXATION };
+    }
+    const losses = lossesAt(part, relaxation.prices);
+    const rest = line.widestGap(losses.tangent, open, precision);
+    if (!rest) return closed(RELAXATION);
+    const prices = relaxation.prices.slice();
+    const enumeration = this.enumerate(settings, losses, prices, rest);
+    const effort = RELAXATION + enumeration.branches;
+    if (enumeration.isThrough) return closed(effort);
+    const left = line.widestGap(losses.tangent, rest, precision);
+    if (!left) return closed(effort);
+    return this.split(losses, left, relaxation, effort);
+  }
+
+  private enumerate(
+    { line, found, precision }: NodeSettings,
+    losses: Losses,
+    prices: Float64Array,
+    stretch: Stretch & { gap: number },
+  ): { isThrough: boolean; branches: number } {
+    const deviations = new Deviations(this.part, losses, stretch.gap);
+    const enumeration = new Enumeration({ deviations, prices, stretch, line, precision, found });
+    // short runs first: what they find makes the gap, and with it the long run, smaller
+    for (let cap = stretch.gap / 8; cap < stretch.gap; cap *= 2) {
+      const left = MOST_BRANCHES - enumeration.branches;
+      if (!enumeration.run(cap, left)) return { isThrough: false, branches: enumeration.branches };
+    }
+    const isThrough = enumeration.run(stretch.gap, MOST_BRANCHES - enumeration.branches);
+    return { isThrough, branches: enumeration.branches };
+  }
+
+  private split(
+    losses: Losses,
+    stretch: Stretch & { gap: number },
+    relaxation: Relaxation,
+    effort: number,
+  ): Outcome {
+    const { part } = this;
+    const { tangent } = losses;
+    const keep = Uint8Array.from(losses.loss, (loss) => (loss <= stretch.gap ? 1 : 0));
+    const shares = relaxation.shares.slice();
+    const known = knownFrom(part, relaxation);
+    const branches = branchAtOption(part, shares, keep);
+    if (stretch.to > stretch.from && (!branches || this.strays(tangent, stretch, relaxation))) {
+      const middle = Math.floor((stretch.from + stretch.to) / 2);
+      const halves = [
+        { from: stretch.from, to: middle },
+        { from: middle + 1, to: stretch.to },
+      ];
+      const children = halves.flatMap((half) => this.within(half, keep, tangent, known));
+      return { children, effort: effort + 2 * RELAXATION };
+    }
+    const children = (branches ?? branchAtFirst(part, keep)).flatMap(({ keep: kept, pieces }) => {
+      const child = narrow(part, kept, { ...stretch, ...pieces });
+      return child ? [new OpenNode(child, tangent, known)] : [];
+    });
+    return { children, effort: effort + 2 * RELAXATION };
+  }
+
+  /** Whether at an end of the stretch the tangent lies above the relaxation by a good part of the gap. */
+  private strays(
+    tangent: Tangent,
+    { from, to, gap }: Stretch & { gap: number },
+    relaxation: Relaxation,
+  ): boolean {
+    return [from, to].some((cost) => {
+      if (!relaxation.minimise(cost)) return true;
+      const there = lossesAt(this.part, relaxation.prices).tangent;
+      return tangent.height + tangent.slope * cost - there.height - there.slope * cost > STRAY_SHARE * gap;
+    });
+  }
+
+  private within(stretch: Stretch, keep: Uint8Array, tangent: Tangent, known: KnownPrices): OpenNode[] {
+    const { leastPieces, mostPieces } = this.part;
+    const part = narrow(this.part, keep.slice(), { ...stretch, leastPieces, mostPieces });
+    return part ? [new OpenNode(part, tangent, known)] : [];
+  }
+}
+
+function closed(effort: number): Outcome {
+  return { children: [], effort };
+}
+
+function everything({ option }: OpenPart): Uint8Array {
+  return new Uint8Array(option.length).fill(1);
+}
+
+function knownFrom(part: OpenPart, { prices, shares }: Relaxation): KnownPrices {
+  const priceById = new Map<number, number>();
+  for (const [place, id] of part.row.entries()) priceById.set(id, prices[place]);
+  const priceOfCost = prices[part.row.length];
+  const inShares = new Set<number>();
+  for (let place = 0; place < shares.length; place++) {
+    if (shares[place] > 0 && shares[place] < 1) inShares.add(part.option[place]);
+  }
+  return { priceOfRow: (id) => priceById.get(id) ?? 0, priceOfCost, inShares };
+}
+
+/** What solving a relaxation counts for, in branches of an enumeration. */
+const RELAXATION = 500;
+const MOST_BRANCHES = 2_000;
+const STRAY_SHARE = 0.25;

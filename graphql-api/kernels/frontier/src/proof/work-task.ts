@@ -1,0 +1,58 @@
+import type { Model } from '../model/model.js';
+import { partOf } from '../relaxation/open-part.js';
+import { OpenNode, type NodeSettings } from './open-node.js';
+import { precisionOf } from './precision.js';
+import {
+  nodeOf,
+  type FoundPortfolio,
+  type ProofNode,
+  type ProofTask,
+  type ProofTaskResult,
+} from './proof-task.js';
+import { StepLine } from './step-line.js';
+import { WidestFirst } from './widest-first.js';
+
+/**
+ * Works on a task until nothing is open or its effort is spent, widest gap first. A pure function of its arguments:
+ * the same task gives the same result wherever and whenever it is done.
+ */
+export function workTask(model: Model, task: ProofTask): ProofTaskResult {
+  const line = new StepLine(task.known);
+  const found: FoundPortfolio[] = [];
+  const settings: NodeSettings = { line, found, precision: precisionOf(model) };
+  // a gap only shrinks as points are found: the one a node is filed under is an upper bound
+  const open = new WidestFirst<OpenNode>();
+  for (const node of task.nodes) {
+    const part = partOf(model, node.options, rangeOf(node));
+    if (part) file(open, new OpenNode(part, node.tangent), settings);
+  }
+  let effort = 0;
+  while (open.size > 0 && effort < task.effort) {
+    const outcome = open.take()!.work(settings);
+    effort += outcome.effort;
+    for (const child of outcome.children) file(open, child, settings);
+  }
+  return {
+    id: task.id,
+    found: found.filter(({ cost, benefit }) => line.has(cost, benefit)),
+    open: open
+      .values()
+      .filter((node) => node.gap(settings) >= 0)
+      .map(({ part, tangent }) => nodeOf(part, tangent)),
+    effort,
+  };
+}
+
+function file(open: WidestFirst<OpenNode>, node: OpenNode, settings: NodeSettings): void {
+  const gap = node.gap(settings);
+  if (gap >= 0) open.add(gap, node);
+}
+
+function rangeOf({ from, to, leastPieces, mostPieces = Infinity }: ProofNode): {
+  from: number;
+  to: number;
+  leastPieces: number;
+  mostPieces: number;
+} {
+  return { from, to, leastPieces, mostPieces };
+}
