@@ -1,10 +1,10 @@
-import { MoveList } from '../local-search/move-list.js';
 import { compileModel } from '../model/compile-model.js';
 import { Links } from '../model/links.js';
 import type { Model } from '../model/model.js';
 import { picksOf, WorkingPortfolio } from '../model/working-portfolio.js';
 import { totalsOf, type Picks } from '../problem/feasible.js';
 import type { Problem } from '../problem/problem.js';
+import { exchangeMoves, waysToChoose, type ExchangeMove } from './exchange-moves.js';
 
 /** How a portfolio changes so that an item comes in. */
 export interface Exchange {
@@ -49,7 +49,6 @@ interface Found {
 class ExchangeSearch {
   private readonly portfolio: WorkingPortfolio;
   private readonly links: Links;
-  private readonly moves: MoveList;
   private best: Found | undefined;
 
   constructor(
@@ -60,56 +59,58 @@ class ExchangeSearch {
   ) {
     this.portfolio = new WorkingPortfolio(model);
     this.links = new Links(model);
-    this.moves = new MoveList(this.portfolio, this.links);
   }
 
   run(): Int32Array | undefined {
     const { model, item, start, portfolio, links } = this;
     const k = model.classOfItem[item];
+    portfolio.load(start);
     for (let option = model.optionStart[k]; option < model.optionStart[k + 1]; option++) {
       if (model.optionItem[option] !== item) continue;
-      this.lookAround([option]);
-      portfolio.load(start);
-      if (!links.asksForMore(portfolio, option)) continue;
-      for (let variant = 0; variant < links.variants(option); variant++) {
-        portfolio.load(start);
-        const size = links.packageOf(portfolio, option, variant);
-        if (size > 0) this.lookAround([...links.together.subarray(0, size)]);
+      for (const options of waysToChoose(portfolio, links, option)) {
+        const before = this.make(options);
+        this.lookAround();
+        this.make(before);
       }
     }
     return this.best?.chosen;
   }
 
-  /** The portfolio with these options, then with every further change, then with every two of them. */
-  private lookAround(options: readonly number[]): void {
-    const { portfolio, moves } = this;
-    portfolio.load(this.start);
-    for (const option of options) portfolio.choose(option);
+  /** The portfolio as it stands, then with every further change, then with every two of them. */
+  private lookAround(): void {
     this.consider(0);
-    moves.refresh();
-    const undo: number[] = [];
-    for (let move = 0; move < moves.count; move++) {
-      moves.make(move, undo);
+    const moves = exchangeMoves(this.portfolio, this.links);
+    for (const [place, { options }] of moves.entries()) {
+      const before = this.make(options);
       this.consider(1);
-      this.lookAtPairs(move);
-      moves.takeBack(undo);
+      this.lookAtPairs(moves, place);
+      this.make(before);
     }
   }
 
   /** The hot loop: a pair is judged by two additions, and made only if it would be the best so far. */
-  private lookAtPairs(first: number): void {
-    const { portfolio, moves, mostCost } = this;
-    const { cost: costNow, benefit: benefitNow } = portfolio;
-    const { benefitChange, costChange, count } = moves;
-    const undo: number[] = [];
-    for (let second = first + 1; second < count; second++) {
-      const cost = costNow + costChange[second];
-      if (cost > mostCost || !this.wouldBeBest(benefitNow + benefitChange[second], cost, 2)) continue;
-      if (moves.overlap(first, second)) continue;
-      moves.make(second, undo);
+  private lookAtPairs(moves: readonly ExchangeMove[], first: number): void {
+    const { mostCost } = this;
+    const { cost: costNow, benefit: benefitNow } = this.portfolio;
+    for (let second = first + 1; second < moves.length; second++) {
+      const { options, benefitChange, costChange } = moves[second];
+      const cost = costNow + costChange;
+      if (cost > mostCost || !this.wouldBeBest(benefitNow + benefitChange, cost, 2)) continue;
+      const before = this.make(options);
       this.consider(2);
-      moves.takeBack(undo);
+      this.make(before);
     }
+  }
+
+  /** Chooses the options and returns those they replace, in the order in which to choose them again. */
+  private make(options: readonly number[]): number[] {
+    const { portfolio, model } = this;
+    const before: number[] = [];
+    for (const option of options) {
+      before.unshift(portfolio.chosen[model.optionClass[option]]);
+      portfolio.choose(option);
+    }
+    return before;
   }
 
   private consider(changes: number): void {
