@@ -30,3 +30,25 @@ export {
   type SearchSettings,
   type StopSearch,
 } from './search.js';
+export { marginalUtilities, marginalUtilityKnee } from './archive/marginal-utility-knee.js';
+export { cheapestExchange, type Exchange } from './explain/cheapest-exchange.js';
+export { coreIndex, type CoreIndex, type CostWindow, type Share } from './explain/core-index.js';
+export { describeCollision } from './explain/describe-collision.js';
+export { describeLeftOut } from './explain/describe-left-out.js';
+export { describeReduction } from './explain/describe-reduction.js';
+export { benefitToComeIn, priceToComeIn, type EntryThreshold } from './explain/entry-threshold.js';
+export { loosen, type Loosening } from './explain/loosening.js';
+export { lossWithout, type LossWithout } from './explain/loss-without.js';
+export {
+  robustnessOf,
+  type Robustness,
+  type ScenarioRegret,
+  type SolvedScenario,
+} from './explain/robustness.js';
+export type { Rule } from './explain/rules.js';
+export { costScenarios, withBenefits, withCosts, type Scenario } from './explain/scenarios.js';
+export { smallestCollisions, type Collision, type CollisionSettings } from './explain/smallest-collisions.js';
+export type { Point, Solve, Solved } from './explain/solve.js';
+export { whyLeftOut, type LeftOut, type Obstacle } from './explain/why-left-out.js';
+export { reduceProblem, type Reduced } from './reduction/reduce-problem.js';
+export type { Reduction } from './reduction/reduction.js';
