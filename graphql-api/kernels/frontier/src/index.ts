@@ -15,6 +15,13 @@ export {
   type FrontierDocument,
   type RunFacts,
 } from './result/frontier-document.js';
+export {
+  parseFrontier,
+  type ClaimedCertificate,
+  type ClaimedFrontier,
+  type ClaimedPoint,
+} from './result/parse-frontier.js';
+export { verifyFrontier, type Finding } from './result/verify-frontier.js';
 export { hypervolume } from './archive/hypervolume.js';
 export { kneeOf } from './archive/knee.js';
 export { ParetoFront } from './archive/pareto-front.js';

@@ -8,6 +8,6 @@ export class ProblemError extends Error {
     readonly expected: string,
     readonly found: string,
   ) {
-    super(`${path === '' ? 'The problem' : path}: expected ${expected}, found ${found}.`);
+    super(`${path === '' ? 'The document' : path}: expected ${expected}, found ${found}.`);
   }
 }
