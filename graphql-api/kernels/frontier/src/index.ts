@@ -41,6 +41,7 @@ export { marginalUtilities, marginalUtilityKnee } from './archive/marginal-utili
 export { cheapestExchange, type Exchange } from './explain/cheapest-exchange.js';
 export { coreIndex, type CoreIndex, type CostWindow, type Share } from './explain/core-index.js';
 export { describeCollision } from './explain/describe-collision.js';
+export { describeEntry, describeLoss } from './explain/describe-entry.js';
 export { describeLeftOut } from './explain/describe-left-out.js';
 export { describeReduction } from './explain/describe-reduction.js';
 export { benefitToComeIn, priceToComeIn, type EntryThreshold } from './explain/entry-threshold.js';
@@ -56,6 +57,7 @@ export type { Rule } from './explain/rules.js';
 export { costScenarios, withBenefits, withCosts, type Scenario } from './explain/scenarios.js';
 export { smallestCollisions, type Collision, type CollisionSettings } from './explain/smallest-collisions.js';
 export type { Point, Solve, Solved } from './explain/solve.js';
+export { solveBySearch } from './explain/solve-by-search.js';
 export { whyLeftOut, type LeftOut, type Obstacle } from './explain/why-left-out.js';
 export { reduceProblem, type Reduced } from './reduction/reduce-problem.js';
 export type { Reduction } from './reduction/reduction.js';

@@ -36,6 +36,17 @@ describe('rules that collide', () => {
     ]);
   });
 
+  it('are named beside the plain reasons', () => {
+    const problem = aProblem(['bed', 'lamp'], { ceiling: 15, mustInclude: ['bed', 'lamp'] });
+    expect(explainInfeasible(problem, String, solveByTrying)).toEqual([
+      'What must be taken (bed, lamp) brings cost to 20 at least, 5 over the ceiling of 15.',
+      'These cannot all be kept: a ceiling of 15; bed must be taken; lamp must be taken.',
+      'It would be enough to have a ceiling of 20, 5 more.',
+      'It would be enough to give this up: bed must be taken.',
+      'It would be enough to give this up: lamp must be taken.',
+    ]);
+  });
+
   it('are all named where there are several, and then no single one is enough', () => {
     const items = [
       ...twoWards().items,

@@ -7,15 +7,16 @@ import type { Solve } from './solve.js';
 import type { WriteFigure } from './write-figure.js';
 
 /**
- * Why no portfolio can keep every limit and link, in sentences. First the reasons that need no search. Where there are
- * none and a search is given, the smallest sets of rules that collide, each with what would have to give way. An empty
- * list proves nothing.
+ * Why no portfolio can keep every limit and link, in sentences: the reasons that need no search, and, where a search is
+ * given, the smallest sets of rules that collide, each with what would have to give way. An empty list proves nothing.
+ * The search is asked many times and must not ask for an explanation itself.
  */
 export function explainInfeasible(problem: Problem, write: WriteFigure = String, solve?: Solve): string[] {
   const plain = plainReasons(problem, write);
-  if (plain.length > 0 || solve === undefined) return plain;
-  return smallestCollisions(problem, solve).flatMap((collision) => {
+  if (solve === undefined) return plain;
+  const collisions = smallestCollisions(problem, solve).flatMap((collision) => {
     const loosenings = collision.rules.map((rule) => loosen(problem, rule, solve));
     return describeCollision(collision, loosenings, write);
   });
+  return [...plain, ...collisions];
 }
