@@ -28,12 +28,11 @@ export class ChoiceStore {
     for (let k = 0; k < classCount; k++) page[start + k] = chosen[k] - optionStart[k];
   }
 
-  /** The option of each class, as an array of its own. */
-  get(slot: number): Int32Array {
+  /** Writes the option of each class into `chosen` and returns it. */
+  get(slot: number, chosen: Int32Array): Int32Array {
     const { classCount, optionStart, pageBits } = this;
     const page = this.pages[slot >> pageBits];
     const start = (slot - ((slot >> pageBits) << pageBits)) * classCount;
-    const chosen = new Int32Array(classCount);
     for (let k = 0; k < classCount; k++) chosen[k] = optionStart[k] + page[start + k];
     return chosen;
   }

@@ -25,6 +25,7 @@ export class ParetoFront {
   private homesUsed = 1;
 
   private count = 0;
+  private readonly classCount: number;
   private readonly choices: ChoiceStore;
   private readonly freeSlots: number[] = [];
   private slotsUsed = 0;
@@ -42,6 +43,7 @@ export class ParetoFront {
     optionStart: Int32Array,
     private readonly onBeaten: (benefit: number, cost: number) => void = () => undefined,
   ) {
+    this.classCount = optionStart.length - 1;
     this.choices = new ChoiceStore(optionStart);
   }
 
@@ -67,9 +69,17 @@ export class ParetoFront {
     return this.slots[this.memberAt(place)];
   }
 
-  /** The chosen option of each class of a member, as an array of its own. */
-  choicesAt(place: number): Int32Array {
-    return this.choices.get(this.slotAt(place));
+  /** The chosen option of each class of a member, in an array of its own or in the one given. */
+  choicesAt(place: number, into: Int32Array = new Int32Array(this.classCount)): Int32Array {
+    return this.choices.get(this.slotAt(place), into);
+  }
+
+  /** The place of the dearest member that costs no more; -1 if there is none. */
+  placeWithin(cost: number): number {
+    const leaf = this.leafOf(cost);
+    while (this.walkLeaf < leaf) this.walkFrom += this.leafSize[this.walkLeaf++];
+    while (this.walkLeaf > leaf) this.walkFrom -= this.leafSize[--this.walkLeaf];
+    return this.walkFrom + this.memberAfter(leaf, cost) - this.home[leaf] - 1;
   }
 
   /** The most benefit of a member that costs no more; minus infinity if there is none. */

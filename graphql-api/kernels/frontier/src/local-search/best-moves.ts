@@ -2,16 +2,20 @@
 export class BestMoves {
   readonly moves: number[] = [];
   private readonly scores: number[] = [];
-
-  /** Only scores above `least` count. */
-  constructor(
-    private readonly capacity: number,
-    private readonly least: number,
-  ) {}
-
+  private capacity = 1;
   /** A move is only worth offering with a higher score than this. */
-  get threshold(): number {
-    return this.moves.length < this.capacity ? this.least : this.scores[this.capacity - 1];
+  threshold = -Infinity;
+
+  constructor(capacity: number, least: number) {
+    this.clear(capacity, least);
+  }
+
+  /** Forgets all moves; from now on keeps so many, and only with scores above `least`. */
+  clear(capacity: number, least: number): void {
+    this.moves.length = 0;
+    this.scores.length = 0;
+    this.capacity = capacity;
+    this.threshold = least;
   }
 
   offer(move: number, score: number): void {
@@ -24,5 +28,6 @@ export class BestMoves {
     }
     this.moves[place] = move;
     this.scores[place] = score;
+    if (this.moves.length === this.capacity) this.threshold = this.scores[this.capacity - 1];
   }
 }

@@ -4,7 +4,7 @@ import type { WorkingPortfolio } from '../model/working-portfolio.js';
 
 /**
  * Looks at every portfolio that so many changes of a selection of moves lead to, in order of the selection. It can be
- * left and taken up again; in between the portfolio is the scan's and must not be touched.
+ * left and taken up again; in between the portfolio and its list of moves are the scan's and must not be touched.
  */
 export class CombinationScan {
   private changes = 2;
@@ -29,8 +29,14 @@ export class CombinationScan {
   begin(size: number, selection: Int32Array): void {
     this.changes = size;
     this.selection = selection;
-    this.benefitChange = Float64Array.from(selection, (move) => this.moves.benefitChange[move]);
-    this.costChange = Float64Array.from(selection, (move) => this.moves.costChange[move]);
+    if (this.benefitChange.length < selection.length) {
+      this.benefitChange = new Float64Array(selection.length);
+      this.costChange = new Float64Array(selection.length);
+    }
+    for (let place = 0; place < selection.length; place++) {
+      this.benefitChange[place] = this.moves.benefitChange[selection[place]];
+      this.costChange[place] = this.moves.costChange[selection[place]];
+    }
     this.made.length = 0;
   }
 
@@ -53,7 +59,7 @@ export class CombinationScan {
       if (place + stillToChoose > this.selection.length) {
         if (this.made.length === 0) return false;
         place = this.unmake() + 1;
-      } else if (this.clashes(this.selection[place])) {
+      } else if (this.moves.isOutOfDate(this.selection[place])) {
         place++;
       } else {
         this.make(place);
@@ -65,12 +71,11 @@ export class CombinationScan {
 
   /** The hot loop: the moves made together with each move after them in the selection. */
   private scanRow(): void {
-    const { portfolio, archive, benefitChange, costChange } = this;
+    const { archive, benefitChange, costChange } = this;
     const { front, leastCost, mostCost, bucketsPerCost, surelyBeaten } = archive;
-    const costNow = portfolio.cost;
-    const benefitNow = portfolio.benefit;
+    const { cost: costNow, benefit: benefitNow } = this.portfolio;
     const from = this.made[this.made.length - 1] + 1;
-    const count = costChange.length;
+    const count = this.selection.length;
     for (let place = from; place < count; place++) {
       const cost = costNow + costChange[place];
       if (cost > mostCost) continue;
@@ -79,7 +84,7 @@ export class CombinationScan {
       const bucket = cost <= leastCost ? 0 : ((cost - leastCost) * bucketsPerCost) | 0;
       if (benefit <= surelyBeaten[bucket]) continue;
       if (front.bestBenefitWithin(cost) >= benefit) continue;
-      if (this.isFeasibleWith(place)) this.offerWith(place);
+      if (this.isPossible(place)) this.offerWith(place);
     }
     this.sampleRow(from);
     archive.evaluations += count - from;
@@ -88,35 +93,27 @@ export class CombinationScan {
   /** Notes those evaluations of the row whose turn it is in the sample of what was looked at. */
   private sampleRow(from: number): void {
     const { lookedAt, evaluations, mostCost } = this.archive;
+    const { portfolio } = this;
     for (;;) {
       const place = from + Math.max(0, lookedAt.nextWanted - evaluations);
       if (place >= this.selection.length) return;
       const number = evaluations + place - from;
-      const cost = this.portfolio.cost + this.costChange[place];
-      const benefit = this.portfolio.benefit + this.benefitChange[place];
-      if (cost <= mostCost && this.isFeasibleWith(place)) lookedAt.take(number, cost, benefit);
+      const cost = portfolio.cost + this.costChange[place];
+      const benefit = portfolio.benefit + this.benefitChange[place];
+      if (cost <= mostCost && this.isPossible(place)) lookedAt.take(number, cost, benefit);
       else lookedAt.skip(number);
     }
   }
 
-  private isFeasibleWith(place: number): boolean {
+  private isPossible(place: number): boolean {
     const move = this.selection[place];
-    if (this.clashes(move)) return false;
-    const undo: number[] = [];
-    this.moves.make(move, undo);
-    const feasible = this.portfolio.isFeasible();
-    this.moves.takeBack(undo);
-    return feasible;
+    return !this.moves.isOutOfDate(move) && this.moves.keepsRows(move);
   }
 
   private offerWith(place: number): void {
     this.make(place);
     this.archive.offer(this.portfolio);
     this.unmake();
-  }
-
-  private clashes(move: number): boolean {
-    return this.made.some((place) => this.moves.overlap(this.selection[place], move));
   }
 
   private make(place: number): void {
@@ -134,9 +131,12 @@ export class CombinationScan {
 
 /** The moves of a list that lose least at a price for cost, at most so many, least loss first. */
 export function leastLoss(moves: MoveList, price: number, most: number): Int32Array {
-  const loss = Float64Array.from({ length: moves.count }, (_, move) => {
-    return price * moves.costChange[move] - moves.benefitChange[move];
-  });
-  const order = Int32Array.from({ length: moves.count }, (_, move) => move);
-  return order.sort((one, other) => loss[one] - loss[other] || one - other).subarray(0, most);
+  const { count, costChange, benefitChange } = moves;
+  const loss = new Float64Array(count);
+  for (let move = 0; move < count; move++) loss[move] = price * costChange[move] - benefitChange[move];
+  const limit = count > most ? loss.toSorted()[most - 1] : Infinity;
+  const order: number[] = [];
+  for (let move = 0; move < count; move++) if (loss[move] <= limit) order.push(move);
+  order.sort((one, other) => loss[one] - loss[other] || one - other);
+  return Int32Array.from(order.slice(0, most));
 }

@@ -1,13 +1,13 @@
 import { CombinationScan, leastLoss } from './combination-scan.js';
 import { chooseGreedily, startWeights, type StartWeights } from './construct.js';
 import { describeViolation, violationsOf } from '../problem/feasible.js';
+import { ExplorationOrder } from './exploration-order.js';
 import { Links } from '../model/links.js';
 import type { Model } from '../model/model.js';
 import { MoveList } from './move-list.js';
 import { Random } from './random.js';
 import { SearchArchive } from '../archive/search-archive.js';
-import { improve, repair } from './settle.js';
-import { scanSingles } from './single-scan.js';
+import { Settler } from './settler.js';
 import { picksOf, WorkingPortfolio } from '../model/working-portfolio.js';
 
 /**
@@ -22,8 +22,14 @@ export class LocalSearch {
   private readonly portfolio: WorkingPortfolio;
   private readonly links: Links;
   private readonly moves: MoveList;
+  private readonly settler: Settler;
+  private readonly order: ExplorationOrder;
+  /** The scan has a portfolio of its own, so that a start may be offered while it is under way. */
+  private readonly scanned: WorkingPortfolio;
+  private readonly scannedMoves: MoveList;
   private readonly scan: CombinationScan;
   private readonly random: Random;
+  private readonly loaded: Int32Array;
 
   private readonly starts: StartWeights[];
   private scanUnderWay = false;
@@ -42,8 +48,13 @@ export class LocalSearch {
     this.portfolio = new WorkingPortfolio(model);
     this.links = new Links(model);
     this.moves = new MoveList(this.portfolio, this.links);
-    this.scan = new CombinationScan(this.portfolio, this.moves, this.archive);
+    this.settler = new Settler(this.portfolio, this.moves, this.archive);
+    this.order = new ExplorationOrder(this.archive, COMBINATIONS.length + 1);
+    this.scanned = new WorkingPortfolio(model);
+    this.scannedMoves = new MoveList(this.scanned, this.links);
+    this.scan = new CombinationScan(this.scanned, this.scannedMoves, this.archive);
     this.random = new Random(seed);
+    this.loaded = new Int32Array(model.classCount);
     this.starts = startWeights(model, START_PRICES).reverse();
     this.settle(0);
   }
@@ -61,7 +72,7 @@ export class LocalSearch {
       this.settle(start.price);
       return;
     }
-    const member = this.widestUnexplored();
+    const member = this.order.next();
     const isWide = member >= 0 && this.levelOf(member) === WIDEST_LEVEL;
     if (member < 0 || (isWide && this.shakesDue > 0)) this.shake();
     else this.explore(member);
@@ -84,43 +95,17 @@ export class LocalSearch {
     const level = this.levelOf(place);
     const price = this.priceAt(place);
     this.archive.setExplored(front.slotAt(place), level + 1);
-    this.portfolio.load(front.choicesAt(place));
-    this.moves.refresh();
     if (level === 0) {
-      scanSingles(this.portfolio, this.moves, this.archive, price, 1);
+      this.portfolio.load(front.choicesAt(place, this.loaded));
+      this.moves.refresh();
+      this.settler.scanSingles(price, 1);
       return;
     }
     const { size, most } = COMBINATIONS[level - 1];
-    this.scan.begin(size, leastLoss(this.moves, price, most));
+    this.scanned.load(front.choicesAt(place, this.loaded));
+    this.scannedMoves.refresh();
+    this.scan.begin(size, leastLoss(this.scannedMoves, price, most));
     this.scanUnderWay = true;
-  }
-
-  /** The member with the widest gap among those whose neighbourhood is least explored; -1 if all is explored. */
-  private widestUnexplored(): number {
-    const { size } = this.archive.front;
-    let best = -1;
-    let leastLevel = WIDEST_LEVEL;
-    let widest = -1;
-    for (let place = 0; place < size; place++) {
-      const level = this.levelOf(place);
-      if (level > leastLevel) continue;
-      const gap = this.gapAround(place);
-      if (level === leastLevel && gap <= widest) continue;
-      leastLevel = level;
-      widest = gap;
-      best = place;
-    }
-    return best;
-  }
-
-  /** The most hypervolume that new members between this one's neighbours could add. */
-  private gapAround(place: number): number {
-    const { front } = this.archive;
-    const last = front.size - 1;
-    const costStep = place > 0 ? front.costAt(place) - front.costAt(place - 1) : Math.max(1, front.costAt(0));
-    const benefitStep =
-      place < last ? front.benefitAt(place + 1) - front.benefitAt(place) : front.benefitAt(last);
-    return costStep * benefitStep;
   }
 
   private levelOf(place: number): number {
@@ -132,7 +117,7 @@ export class LocalSearch {
     const { archive, random, portfolio } = this;
     const before = { evaluations: archive.evaluations, improvements: archive.improvements };
     const place = archive.front.size > 0 ? random.below(archive.front.size) : -1;
-    if (place >= 0) portfolio.load(archive.front.choicesAt(place));
+    if (place >= 0) portfolio.load(archive.front.choicesAt(place, this.loaded));
     else if (this.nearest) portfolio.load(this.nearest.chosen);
     for (let change = 0; change < this.shakeSize; change++) this.changeAtRandom();
     this.settle(place >= 0 ? this.priceAt(place) : 0);
@@ -155,13 +140,13 @@ export class LocalSearch {
 
   /** Repairs the portfolio and improves it, both at a price for cost. */
   private settle(price: number): void {
-    const { portfolio, moves, archive } = this;
-    if (!repair(portfolio, moves, archive, price)) {
+    const { portfolio, settler, archive } = this;
+    if (!settler.repair(price)) {
       this.noteNearest();
       return;
     }
     if (!archive.isBeaten(portfolio.benefit, portfolio.cost)) archive.offer(portfolio);
-    improve(portfolio, moves, archive, price);
+    settler.improve(price);
   }
 
   /** What a unit of cost is worth around a member: the slope of the front between its neighbours. */

@@ -11,6 +11,8 @@ export class Links {
   private readonly neededBy: readonly { item: number; anyOf: readonly number[] }[][];
   private readonly excludes: readonly number[][];
   private readonly linkedClass: Uint8Array;
+  /** The options of all classes that a link concerns. */
+  readonly linkedOptions: Int32Array;
   private readonly changedIn: Int32Array;
   private round = 0;
   /** The options of the last package, as many as packageOf answered. */
@@ -39,9 +41,17 @@ export class Links {
     }
     this.excludes = excludes.map((others) => [...others]);
     this.linkedClass = Uint8Array.from({ length: model.classCount }, (_, k) => (this.isLinked(k) ? 1 : 0));
+    this.linkedOptions = Int32Array.from(model.optionClass.keys()).filter((option) =>
+      this.concern(model.optionClass[option]),
+    );
     this.changedIn = new Int32Array(model.classCount);
     this.together = new Int32Array(model.classCount);
     this.replaced = new Int32Array(model.classCount);
+  }
+
+  /** Whether a link concerns an item of the class. */
+  concern(k: number): boolean {
+    return this.linkedClass[k] === 1;
   }
 
   /** Whether choosing the option alone would newly break a link. */
@@ -81,18 +91,23 @@ export class Links {
         (item < 0 || (this.dropExcluded(portfolio, item) && this.takePartners(portfolio, item, variant))) &&
         (before < 0 || this.dropStranded(portfolio, before));
     }
-    for (let at = this.size - 1; at >= 0; at--) portfolio.choose(this.replaced[at]);
+    for (let at = 0; at < this.size; at++) {
+      portfolio.chosen[this.model.optionClass[this.replaced[at]]] = this.replaced[at];
+    }
     return complete ? this.size : 0;
   }
 
-  /** Adds a choice to the package; false if the package has changed that class already. */
+  /**
+   * Adds a choice to the package; false if the package has changed that class already. While a package is put
+   * together only the list of the chosen matters; the sums of the portfolio are left as they are, which is faster.
+   */
   private choose(portfolio: WorkingPortfolio, option: number): boolean {
     const k = this.model.optionClass[option];
     if (this.changedIn[k] === this.round) return false;
     this.changedIn[k] = this.round;
     this.replaced[this.size] = portfolio.chosen[k];
     this.together[this.size++] = option;
-    portfolio.choose(option);
+    portfolio.chosen[k] = option;
     return true;
   }
 
