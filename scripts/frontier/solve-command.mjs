@@ -1,0 +1,55 @@
+import { parseProblem, toFrontierDocument } from '@metewand/frontier';
+import { fingerprintOf } from './fingerprint.mjs';
+import { ProgressLine } from './progress-line.mjs';
+import { readDocument } from './read-document.mjs';
+import { solve } from './solve.mjs';
+
+/** Writes the frontier of a problem on standard output. Ctrl-C ends the search, and what was found is written. */
+export async function solveCommand({ problemPath, seconds, seed, threads }) {
+  const problem = readDocument(problemPath, parseProblem);
+  const wasInterrupted = interruption();
+  const progress = new ProgressLine();
+  const result = await solve(problem, {
+    seed,
+    threads,
+    seconds,
+    isStopped: wasInterrupted,
+    onProgress: (report) => progress.show(() => inWords(report)),
+  });
+  progress.end(`${result.points.length} points, ${result.status}${result.stopped ? ', stopped' : ''}`);
+  if (wasInterrupted() && result.points.length === 0) return 130;
+  const facts = {
+    fingerprint: fingerprintOf(problem),
+    threads,
+    seconds: Number(progress.seconds.toFixed(3)),
+  };
+  await write(toText(toFrontierDocument(problem, result, facts)));
+  return 0;
+}
+
+/** Answers whether Ctrl-C was pressed; the second time it ends the process as it always does. */
+function interruption() {
+  let interrupted = false;
+  for (const name of ['SIGINT', 'SIGTERM']) process.once(name, () => (interrupted = true));
+  return () => interrupted;
+}
+
+function inWords({ evaluations, of, kept, bestBenefit }) {
+  const millions = (count) => (count / 1e6).toFixed(1);
+  const best = bestBenefit === undefined ? 'none found yet' : `${kept} kept, best benefit ${bestBenefit}`;
+  return `${millions(evaluations)} of ${millions(of)} million looked at, ${best}`;
+}
+
+/** JSON with one key to a line, and in `points` one point to a line. */
+function toText(document) {
+  const entries = Object.entries(document).map(([key, value]) => {
+    const lines =
+      key === 'points' && value.length > 0 ? value.map((each) => `    ${JSON.stringify(each)}`) : undefined;
+    return `  ${JSON.stringify(key)}: ${lines ? `[\n${lines.join(',\n')}\n  ]` : JSON.stringify(value)}`;
+  });
+  return `{\n${entries.join(',\n')}\n}\n`;
+}
+
+function write(text) {
+  return new Promise((resolve) => process.stdout.write(text, resolve));
+}
