@@ -4,9 +4,10 @@ import { checkNode, compile, installDependencies, step } from './ground.mjs';
 import { runVerb } from './processes.mjs';
 import { root } from './root.mjs';
 
-// Runs graphql-api/kernels/*/bench/*.bench.mjs; `npm run bench -- search` runs those whose path contains "search".
+// Runs graphql-api/kernels/*/bench/*.bench.mjs; `npm run bench -- frontier` runs those whose path contains "frontier",
+// and hands them what follows: `npm run bench -- frontier T7 --seed 5`.
 
-const wanted = process.argv[2] ?? '';
+const [wanted = '', ...args] = process.argv.slice(2);
 
 await runVerb('bench', async (processes) => {
   checkNode();
@@ -15,7 +16,7 @@ await runVerb('bench', async (processes) => {
   let failures = 0;
   for (const bench of benches().filter((path) => path.includes(wanted))) {
     console.log(`\n${bench}`);
-    const { code } = await processes.run([process.execPath, bench], { cwd: root });
+    const { code } = await processes.run([process.execPath, bench, ...args], { cwd: root });
     if (code !== 0) failures += 1;
   }
   return failures === 0 ? 0 : 1;

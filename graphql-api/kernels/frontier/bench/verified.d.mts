@@ -1,0 +1,3 @@
+import type { Problem } from '../src/problem/problem.js';
+
+export function verifiedProblems(): Problem[];
