@@ -2,6 +2,7 @@ import { describeReduction } from '../src/explain/describe-reduction.js';
 import type { Problem } from '../src/problem/problem.js';
 import { reduceProblem } from '../src/reduction/reduce-problem.js';
 import type { Reduction } from '../src/reduction/reduction.js';
+import { allPortfolios } from './all-portfolios.js';
 import { aProblem } from './examples.js';
 import { bruteForceFront } from './brute-force.js';
 import { aRandomProblem } from './seeded.js';
@@ -29,7 +30,6 @@ const coarsened = (problem: Problem): Problem => ({
     oneOf: index % 3 === 0 ? undefined : `group ${index % 2}`,
     needs: index % 4 === 0 ? item.needs : undefined,
   })),
-  eitherOr: problem.eitherOr?.slice(1),
   counts: problem.counts?.slice(1),
 });
 
@@ -158,6 +158,22 @@ describe('what is settled before a search', () => {
   it('knows when nothing can be feasible', () => {
     const problem = aProblem(['bed', 'lamp'], { ceiling: 15, mustInclude: ['bed', 'lamp'] });
     expect(reduceProblem(problem)).toEqual({ problem, reductions: [], infeasible: true });
+  });
+
+  it('keeps every portfolio of every point where they are wanted', () => {
+    let several = 0;
+    for (let seed = 1; seed <= 120; seed++) {
+      const problem = coarsened(aRandomProblem(seed, 6));
+      const front = new Set(bruteForceFront(problem).map(String));
+      const onFront = (of: Problem): string[] =>
+        allPortfolios(of)
+          .filter(({ cost, benefit }) => front.has(String([cost, benefit])))
+          .map(({ picks }) => JSON.stringify(picks));
+      const all = onFront(problem);
+      expect({ seed, all: onFront(reduceProblem(problem, 'keep all').problem) }).toEqual({ seed, all });
+      if (all.length > front.size) several++;
+    }
+    expect(several).toBeGreaterThan(10);
   });
 
   it('never loses a point of the frontier, on random problems with every kind of limit and link', () => {
