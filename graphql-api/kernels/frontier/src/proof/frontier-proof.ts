@@ -1,4 +1,3 @@
-import type { Model } from '../model/model.js';
 import type { ProofNode, ProofTask, ProofTaskResult } from './proof-task.js';
 
 type Point = readonly [cost: number, benefit: number];

@@ -1,6 +1,6 @@
 import { narrow, type OpenPart } from '../relaxation/open-part.js';
 import { Relaxation, type KnownPrices } from '../relaxation/relaxation.js';
-import { branchAtFirst, branchAtOption } from './branching.js';
+import { branchAtFirst, branchAtOption, branchAtPieces } from './branching.js';
 import { Deviations } from './deviations.js';
 import { Enumeration } from './enumeration.js';
 import { lossesAt, type Losses } from './losses.js';
@@ -29,6 +29,7 @@ export class OpenNode {
     readonly part: OpenPart,
     readonly tangent: Tangent,
     private readonly known?: KnownPrices,
+    private readonly triesPieces = true,
   ) {}
 
   /** The widest gap between the tangent and what is known; below nought if nothing is left to find. */
@@ -99,11 +100,41 @@ export class OpenNode {
       const children = halves.flatMap((half) => this.within(half, keep, tangent, known));
       return { children, effort: effort + 2 * RELAXATION };
     }
+    const byPieces = this.splitAtPieces(losses, stretch, shares, keep, known);
+    if (byPieces) return { children: byPieces, effort: effort + 4 * RELAXATION };
     const children = (branches ?? branchAtFirst(part, keep)).flatMap(({ keep: kept, pieces }) => {
       const child = narrow(part, kept, { ...stretch, ...pieces });
-      return child ? [new OpenNode(child, tangent, known)] : [];
+      return child ? [new OpenNode(child, tangent, known, false)] : [];
     });
     return { children, effort: effort + 2 * RELAXATION };
+  }
+
+  /** The branches at the number of pieces, if that lowers the bound by a good part of the gap in both of them. */
+  private splitAtPieces(
+    { tangent }: Losses,
+    stretch: Stretch & { gap: number },
+    shares: Float64Array,
+    keep: Uint8Array,
+    known: KnownPrices,
+  ): OpenNode[] | undefined {
+    const branches = this.triesPieces ? branchAtPieces(this.part, shares, keep) : undefined;
+    if (!branches) return undefined;
+    const middle = Math.floor((stretch.from + stretch.to) / 2);
+    const children: OpenNode[] = [];
+    for (const { keep: kept, pieces } of branches) {
+      const part = narrow(this.part, kept, { ...stretch, ...pieces });
+      if (!part) continue;
+      const relaxation = new Relaxation(part, known);
+      if (!relaxation.minimise(middle)) {
+        if (!relaxation.minimise(stretch.to)) continue;
+      } else {
+        const there = lossesAt(part, relaxation.prices).tangent;
+        const lowered = tangent.height - there.height + (tangent.slope - there.slope) * middle;
+        if (lowered < SHARP_SHARE * stretch.gap) return undefined;
+      }
+      children.push(new OpenNode(part, tangent, knownFrom(part, relaxation)));
+    }
+    return children;
   }
 
   /** Whether at an end of the stretch the tangent lies above the relaxation by a good part of the gap. */
@@ -149,3 +180,4 @@ function knownFrom(part: OpenPart, { prices, shares }: Relaxation): KnownPrices 
 const RELAXATION = 500;
 const MOST_BRANCHES = 2_000;
 const STRAY_SHARE = 0.25;
+const SHARP_SHARE = 0.25;

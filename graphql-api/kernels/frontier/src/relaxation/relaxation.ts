@@ -39,6 +39,7 @@ export class Relaxation {
   /** The best option of each class at the prices, and options that are as good. */
   private readonly best: Int32Array;
   private readonly ties: number[] = [];
+  private readonly isTie: Uint8Array;
   private readonly tiesInClass: Int32Array;
 
   private readonly worth: Float64Array;
@@ -64,6 +65,7 @@ export class Relaxation {
     this.price = new Float64Array(figures);
     this.isFree = new Uint8Array(figures);
     this.best = new Int32Array(classCount);
+    this.isTie = new Uint8Array(options);
     this.tiesInClass = new Int32Array(classCount);
     this.classOf = new Int32Array(options);
     for (let k = 0; k < classCount; k++) this.classOf.fill(k, start[k], start[k + 1]);
@@ -233,8 +235,10 @@ export class Relaxation {
   /** Makes a tied option the best of its class, and the one that was best a tie: they are as good. */
   private takeAsBest(tie: number): void {
     const k = this.classOf[tie];
-    this.ties[this.ties.indexOf(tie)] = this.best[k];
+    const before = this.best[k];
+    this.dropTie(tie);
     this.best[k] = tie;
+    this.addTie(before);
   }
 
   /** Goes along the edge that an obstacle opens, to the least point; false if there is none. */
@@ -352,7 +356,8 @@ export class Relaxation {
     nextBreak[k] = Infinity;
     for (let option = part.start[k]; option < part.start[k + 1]; option++) {
       const gain = slope[option] - slope[best];
-      if (gain <= STILL) continue;
+      // ties move along with the best: what tells them apart is rounding
+      if (gain <= STILL || this.isTie[option] === 1) continue;
       const distance = Math.max(0, (worth[best] - worth[option]) / gain);
       if (distance >= nextBreak[k]) continue;
       nextBreak[k] = distance;
@@ -377,11 +382,13 @@ export class Relaxation {
 
   private addTie(option: number): void {
     this.ties.push(option);
+    this.isTie[option] = 1;
     this.tiesInClass[this.classOf[option]]++;
   }
 
   private dropTie(option: number): void {
     this.ties.splice(this.ties.indexOf(option), 1);
+    this.isTie[option] = 0;
     this.tiesInClass[this.classOf[option]]--;
   }
 
