@@ -14,6 +14,7 @@ import { correlatedRow, largeRow } from './rows/gaps.mjs';
 import { growthTable } from './rows/growth.mjs';
 import { ratesRow } from './rows/rates.mjs';
 
+import { threadsRow } from './rows/threads.mjs';
 import { verificationRow } from './rows/verification.mjs';
 import { printAligned, printWrapped } from './table.mjs';
 
@@ -27,6 +28,7 @@ const ROWS = [
   largeRow,
   correlatedRow,
   verificationRow,
+  threadsRow,
 
   openDataRow,
   demoRow,

@@ -1,5 +1,4 @@
 import {
-  canonicalText,
   ParetoFront,
   parseFrontier,
   parseProblem,
@@ -8,9 +7,10 @@ import {
   toFrontierDocument,
   verifyFrontier,
 } from '@metewand/frontier';
-import { createHash } from 'node:crypto';
+import { fingerprintOf } from '../../../../scripts/frontier/fingerprint.mjs';
 import { costSteps } from '../../../../scripts/frontier/highs-cost-steps.mjs';
 import { HighsSolver } from '../../../../scripts/frontier/highs-solver.mjs';
+import { solve } from '../../../../scripts/frontier/solve.mjs';
 import { LocalSearch } from '../dist/local-search/local-search.js';
 import { compileModel } from '../dist/model/compile-model.js';
 import { nsga2 } from './nsga2.mjs';
@@ -51,6 +51,16 @@ export function searchAndVerify({ problem, settings, seconds }) {
   const findings = verifyFrontier(parseProblem(read), parseFrontier(claimed), fingerprintOf(read));
   const { status, points } = result;
   return { status, points: points.length, findings, searchSeconds, verifySeconds: verifying.seconds };
+}
+
+/** The search as the command line runs it, on so many threads; CPU seconds of all of them, and seconds by the wall. */
+export async function solveOnThreads({ problem, seed, threads }) {
+  const watch = new Stopwatch();
+  const began = performance.now();
+  const result = await solve(parseProblem(problem), { seed, threads });
+  const wallSeconds = (performance.now() - began) / 1000;
+  const points = result.points.map(({ cost, benefit }) => [cost, benefit]);
+  return { status: result.status, points, seconds: watch.seconds, wallSeconds };
 }
 
 /** Runs the NSGA-II for so many CPU seconds, or until its hypervolume has come to `area`. */
@@ -121,8 +131,4 @@ function searched(problem, settings, isEnough) {
   let step = steps.next();
   while (!step.done) step = steps.next({ stop: isEnough(step.value) });
   return step.value;
-}
-
-function fingerprintOf(problem) {
-  return `sha256:${createHash('sha256').update(canonicalText(problem)).digest('hex')}`;
 }
