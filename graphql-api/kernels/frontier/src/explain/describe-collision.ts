@@ -1,5 +1,5 @@
 import type { Loosening } from './loosening.js';
-import type { Rule } from './rules.js';
+import { isLeastRule, type Rule } from './rules.js';
 import type { Collision } from './smallest-collisions.js';
 import { writeForRule, type WriteFigure } from './write-figure.js';
 
@@ -29,8 +29,7 @@ function describeLoosening({ rule, bound, by, exact }: Loosening, write: WriteFi
   if (bound === undefined || by === undefined) {
     return `It would be enough to give this up: ${describeRule(rule, write)}.`;
   }
-  const isLeast = rule.kind === 'limit least' || rule.kind === 'count least' || rule.kind === 'least benefit';
-  const difference = `${writeForRule(by, rule, write)} ${isLeast ? 'less' : 'more'}`;
+  const difference = `${writeForRule(by, rule, write)} ${isLeastRule(rule) ? 'less' : 'more'}`;
   const perhaps = exact ? '' : '; perhaps less would do';
   return `It would be enough to have ${describeRule({ ...rule, bound }, write)}, ${difference}${perhaps}.`;
 }

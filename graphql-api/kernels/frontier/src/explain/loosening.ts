@@ -1,7 +1,7 @@
 import type { Picks } from '../problem/feasible.js';
 import type { Item, Problem } from '../problem/problem.js';
 import { portfolioOf } from './portfolio-of.js';
-import { rulesOf, withRules, type Rule } from './rules.js';
+import { isLeastRule, rulesOf, withRules, type Rule } from './rules.js';
 import { isProven, type Solve } from './solve.js';
 
 /** How a rule would have to change, and no other, for a portfolio to keep every rule. */
@@ -25,7 +25,7 @@ export function loosen(problem: Problem, rule: Rule, solve: Solve): Loosening {
   const loose = withRules(problem, new Set(others));
   const figure = figureOf(problem, rule);
   if (figure === undefined || rule.bound === undefined) return giveUp(loose, rule, solve);
-  const isLeast = rule.kind === 'limit least' || rule.kind === 'count least' || rule.kind === 'least benefit';
+  const isLeast = isLeastRule(rule);
   const extreme = leastSum(loose, isLeast ? (item) => -figure(item) : figure, solve);
   if (extreme.sum === undefined) {
     return { rule, outcome: extreme.exact ? 'not enough' : 'unknown', exact: extreme.exact };

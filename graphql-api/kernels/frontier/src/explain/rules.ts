@@ -18,6 +18,11 @@ export function rulesOf(problem: Problem): Rule[] {
   return [...sumRules(problem), ...linkRules(problem)];
 }
 
+/** Whether the rule bounds its sum from below. */
+export function isLeastRule({ kind }: Rule): boolean {
+  return kind === 'limit least' || kind === 'count least' || kind === 'least benefit';
+}
+
 /** The problem with only some of its rules. */
 export function withRules(problem: Problem, kept: ReadonlySet<Rule>): Problem {
   const keeps = new Map<Rule['kind'], Set<string>>();
