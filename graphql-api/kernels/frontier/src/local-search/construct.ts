@@ -9,15 +9,18 @@ export interface StartWeights {
 
 /**
  * Weights for the starts: prices from where nearly everything is worth its cost to where nothing is, in even ratios,
- * each without and with the limits in view.
+ * each with the limits in view a little, not at all, and fully. Coarse first: each price lies midway between earlier
+ * ones, so that few starts already spread over the front.
  */
-export function startWeights(model: Model, priceCount: number): StartWeights[] {
+export function startWeights(model: Model): StartWeights[] {
   const { benefit, cost } = averageOption(model);
   const middle = benefit / Math.max(1, cost);
   const weights: StartWeights[] = [];
-  for (let step = 0; step < priceCount; step++) {
-    const price = middle * Math.exp(-4 + (7 * step) / (priceCount - 1));
-    for (const limitShare of [0, 0.3, 1]) weights.push({ price, limitShare });
+  for (const limitShare of [0.3, 0, 1]) {
+    for (let start = 0; start < PRICES; start++) {
+      const price = middle * Math.exp(-4 + (7 * bitsReversed(start)) / PRICES);
+      weights.push({ price, limitShare });
+    }
   }
   return weights;
 }
@@ -48,7 +51,7 @@ function worthOf(model: Model, option: number, price: number, limitPrice: Float6
 }
 
 /** A whole limit is held worth as much as the whole ceiling, times the share. */
-function limitPrices(model: Model, { price, limitShare }: StartWeights): Float64Array {
+export function limitPrices(model: Model, { price, limitShare }: StartWeights): Float64Array {
   const budget =
     model.ceiling < Infinity ? model.ceiling : model.optionCost.reduce((sum, cost) => sum + cost, 0);
   return Float64Array.from(model.rows, ({ kind }, row) =>
@@ -60,4 +63,13 @@ function averageOption({ optionBenefit, optionCost }: Model): { benefit: number;
   const count = Math.max(1, optionBenefit.length);
   const sum = (figures: Float64Array): number => figures.reduce((total, figure) => total + figure, 0);
   return { benefit: sum(optionBenefit) / count, cost: sum(optionCost) / count };
+}
+
+const PRICE_BITS = 5;
+const PRICES = 1 << PRICE_BITS;
+
+function bitsReversed(number: number): number {
+  let reversed = 0;
+  for (let bit = 0; bit < PRICE_BITS; bit++) reversed = (reversed << 1) | ((number >> bit) & 1);
+  return reversed;
 }

@@ -2,6 +2,7 @@ import { CombinationScan, leastLoss } from './combination-scan.js';
 import { chooseGreedily, startWeights, type StartWeights } from './construct.js';
 import { describeViolation, violationsOf } from '../problem/feasible.js';
 import { ExplorationOrder } from './exploration-order.js';
+import { walkUp } from './greedy-walk.js';
 import { Links } from '../model/links.js';
 import type { Model } from '../model/model.js';
 import { MoveList } from './move-list.js';
@@ -31,6 +32,8 @@ export class LocalSearch {
   private readonly random: Random;
   private readonly loaded: Int32Array;
 
+  /** Shares of limits for the walks still to be made, and weights for the starts after them; the next one last. */
+  private readonly walks = [3, 0, 1, 0.3];
   private readonly starts: StartWeights[];
   private scanUnderWay = false;
   /** Evaluations by which the shakes are behind the wide scans. */
@@ -55,8 +58,8 @@ export class LocalSearch {
     this.scan = new CombinationScan(this.scanned, this.scannedMoves, this.archive);
     this.random = new Random(seed);
     this.loaded = new Int32Array(model.classCount);
-    this.starts = startWeights(model, START_PRICES).reverse();
-    this.settle(0);
+    this.starts = startWeights(model).reverse();
+    this.findCheapest();
   }
 
   /** Does the next piece of work, of about so many evaluations where it can be divided. */
@@ -66,12 +69,7 @@ export class LocalSearch {
       this.continueScan(evaluations);
       return;
     }
-    const start = this.starts.pop();
-    if (start !== undefined) {
-      chooseGreedily(this.portfolio, start);
-      this.settle(start.price);
-      return;
-    }
+    if (this.start()) return;
     const member = this.order.next();
     const isWide = member >= 0 && this.levelOf(member) === WIDEST_LEVEL;
     if (member < 0 || (isWide && this.shakesDue > 0)) this.shake();
@@ -82,6 +80,37 @@ export class LocalSearch {
   nearestMiss(): string[] {
     if (!this.nearest || this.archive.front.size > 0) return [];
     return violationsOf(this.model.problem, picksOf(this.model, this.nearest.chosen)).map(describeViolation);
+  }
+
+  /**
+   * Repairs and improves a choice of one option per class at a price for cost, in benefit per unit of cost, and offers
+   * what it comes by. May be called between any two steps.
+   */
+  offerStart(chosen: Int32Array, price: number): void {
+    this.portfolio.load(chosen);
+    this.settle(price);
+  }
+
+  /** A feasible portfolio of little cost, if one is easily had, for the walks to begin at. */
+  private findCheapest(): void {
+    if (this.settler.repair(DEAR)) this.archive.offer(this.portfolio);
+    else this.noteNearest();
+  }
+
+  /** Makes the next of the starts: first the walks, which give a rough front at once. False when all are made. */
+  private start(): boolean {
+    const { portfolio, archive } = this;
+    const limitShare = archive.front.size > 0 ? this.walks.pop() : undefined;
+    if (limitShare !== undefined) {
+      portfolio.load(archive.front.choicesAt(0, this.loaded));
+      walkUp(portfolio, this.links, archive, limitShare);
+      return true;
+    }
+    const weights = this.starts.pop();
+    if (weights === undefined) return false;
+    chooseGreedily(portfolio, weights);
+    this.settle(weights.price);
+    return true;
   }
 
   private continueScan(evaluations: number): void {
@@ -166,7 +195,8 @@ export class LocalSearch {
   }
 }
 
-const START_PRICES = 32;
+/** A price at which any cost outweighs any benefit. */
+const DEAR = 1e9;
 const LEAST_SHAKE = 3;
 const MOST_SHAKE = 12;
 
