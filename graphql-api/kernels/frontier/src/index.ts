@@ -29,9 +29,15 @@ export { parseProblem } from './problem/parse-problem.js';
 export { ProblemError } from './problem/problem-error.js';
 export { PROBLEM_FORMAT, type Count, type Item, type Limit, type Problem } from './problem/problem.js';
 export { Random } from './local-search/random.js';
+export type { FrontierSearch } from './frontier-search.js';
+export type { ProofTask, ProofTaskResult } from './proof/proof-task.js';
+export { workTask } from './proof/work-task.js';
 export {
+  beginSearch,
+  modelOf,
   searchFrontier,
   type FrontierPoint,
+  type ProvenSoFar,
   type SearchProgress,
   type SearchResult,
   type SearchSettings,

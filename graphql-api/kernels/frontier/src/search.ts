@@ -1,29 +1,30 @@
+import { FrontierSearch, NOTHING_KEEPS_ALL } from './frontier-search.js';
 import { explainInfeasible } from './explain/explain-infeasible.js';
-import type { Picks } from './problem/feasible.js';
-import { LocalSearch } from './local-search/local-search.js';
 import { compileModel } from './model/compile-model.js';
 import type { Model } from './model/model.js';
-import type { ParetoFront } from './archive/pareto-front.js';
+import { workTask } from './proof/work-task.js';
+import { reduceProblem } from './reduction/reduce-problem.js';
+import type { Picks } from './problem/feasible.js';
 import { ProblemError } from './problem/problem-error.js';
 import type { Problem } from './problem/problem.js';
-import type { SearchArchive } from './archive/search-archive.js';
-import { picksOf } from './model/working-portfolio.js';
 
 export interface SearchSettings {
   /** The same problem and settings give the same result, whenever and wherever. 1 if left out. */
   readonly seed?: number;
-  /** Portfolios to look at before the search ends; 20 million if left out. */
+  /** Portfolios the local search may look at before it leaves the field to the proof; 20 million if left out. */
   readonly evaluations?: number;
+  /** Branches the proof may look at; as many as it takes if left out. With 0 nothing is proven. */
+  readonly effort?: number;
   /** About how many evaluations lie between two reports; a quarter million if left out. */
   readonly reportEvery?: number;
   /** The most points to keep as a sample of what was looked at; 20 000 if left out. */
   readonly lookedAtSample?: number;
 }
 
-/** How far a search is. Valid until it goes on; `points` is worked out when asked for. */
+/** How far a search is. Valid until it goes on; what is a function is worked out when asked for. */
 export interface SearchProgress {
+  /** Portfolios looked at, by the local search and in the proof. */
   readonly evaluations: number;
-  readonly of: number;
   /** Members of the front so far. */
   readonly kept: number;
   readonly bestBenefit: number | undefined;
@@ -31,6 +32,15 @@ export interface SearchProgress {
   points(): [cost: number, benefit: number][];
   /** The same with what each portfolio takes. */
   portfolios(): FrontierPoint[];
+  proven(): ProvenSoFar;
+}
+
+/** What is proven of a front. Empty lists: nothing. */
+export interface ProvenSoFar {
+  /** Steps [cost, benefit], rising in both: no feasible portfolio of at most that cost has more benefit. */
+  readonly bound: readonly (readonly [cost: number, benefit: number])[];
+  /** Closed intervals of cost in which no point is missing. */
+  readonly provenStretches: readonly (readonly [fromCost: number, toCost: number])[];
 }
 
 /** Send it with `next` to end the search: the next step is the last and brings what was found. */
@@ -45,9 +55,12 @@ export interface FrontierPoint {
 }
 
 /** Plain data: it can be sent between threads and written as JSON. */
-export interface SearchResult {
-  /** `infeasible` only where it is proven that no portfolio meets every rule. */
-  readonly status: 'unproven' | 'infeasible';
+export interface SearchResult extends ProvenSoFar {
+  /**
+   * `complete`: every point is there. `bounded`: the bound holds. `unproven`: nothing is known of what is missing.
+   * `infeasible`: no portfolio meets every rule, which is proven.
+   */
+  readonly status: 'complete' | 'bounded' | 'unproven' | 'infeasible';
   readonly stopped: boolean;
   readonly seed: number;
   readonly evaluations: number;
@@ -62,37 +75,60 @@ export interface SearchResult {
 }
 
 /**
- * Looks for the portfolios that no other feasible portfolio beats in benefit and cost. Finds much and proves
- * nothing: the status of a set with points is `unproven`. Yields a progress now and then; the host
- * decides whether to go on, and ends it early with `next({ stop: true })`.
+ * Looks for the portfolios that no other feasible portfolio beats in benefit and cost, and proves that none is missing,
+ * on one thread. Yields a progress now and then; the host decides whether to go on, and ends it early with
+ * `next({ stop: true })`. FrontierSearch is the same for several threads or machines, with the same result.
  */
 export function* searchFrontier(
   problem: Problem,
   settings: SearchSettings = {},
 ): Generator<SearchProgress, SearchResult, StopSearch | undefined> {
-  refuseSecondCost(problem);
-  const { seed = 1, evaluations = 20_000_000, reportEvery = 250_000, lookedAtSample = 20_000 } = settings;
-  const reasons = explainInfeasible(problem);
-  const model = compileModel(problem);
-  if (reasons.length > 0 || model === undefined) return infeasible(seed, reasons);
-
-  const search = new LocalSearch(model, seed, lookedAtSample);
-  const { archive } = search;
-  const of = Math.min(evaluations, sensibleEvaluations(model));
-  let stopped = false;
-  while (!stopped && archive.evaluations < of) {
-    const pause = Math.min(of, archive.evaluations + reportEvery);
-    while (archive.evaluations < pause) search.step(pause - archive.evaluations);
-    stopped = (yield progressOf(archive, model, of))?.stop ?? false;
+  const begun = beginSearch(problem, settings);
+  if ('result' in begun) return begun.result;
+  const { search, model } = begun;
+  while (!search.isOver) {
+    if (!search.advance()) search.accept(workTask(model, search.take()!));
+    if (!search.isReportDue) continue;
+    if ((yield search.progress())?.stop ?? false) return search.result(true);
   }
-  return resultOf(search, model, seed, stopped && archive.evaluations < of);
+  return search.result(false);
 }
 
-/** Where there are few portfolios, looking at each of them many times over is enough. */
-function sensibleEvaluations({ classCount, optionStart }: Model): number {
-  let portfolios = 1;
-  for (let k = 0; k < classCount; k++) portfolios *= optionStart[k + 1] - optionStart[k];
-  return Math.max(50_000, 64 * portfolios);
+/**
+ * Compiles a problem for a search whose tasks may be worked on elsewhere: anyone who has the problem gets the same
+ * model. Or the result at once, where what is asked for can be seen to collide.
+ */
+export function beginSearch(
+  problem: Problem,
+  settings: SearchSettings,
+): { readonly search: FrontierSearch; readonly model: Model } | { readonly result: SearchResult } {
+  refuseSecondCost(problem);
+  const reasons = explainInfeasible(problem);
+  const model = reasons.length > 0 ? undefined : modelOf(problem);
+  if (model === undefined) return { result: infeasible(settings.seed ?? 1, reasons) };
+  return { search: new FrontierSearch(model, settings), model };
+}
+
+/** The model that tasks of a search for this problem are about. Undefined: no portfolio is possible. */
+export function modelOf(problem: Problem): Model | undefined {
+  const reduced = reduceProblem(problem);
+  return reduced.infeasible ? undefined : compileModel(reduced.problem);
+}
+
+function infeasible(seed: number, reasons: readonly string[]): SearchResult {
+  return {
+    status: 'infeasible',
+    stopped: false,
+    seed,
+    evaluations: 0,
+    points: [],
+    bound: [],
+    provenStretches: [],
+    lookedAt: [],
+    onceKept: [],
+    counts: { lookedAt: 0, kept: 0, sinceBeaten: 0 },
+    notes: reasons.length > 0 ? reasons : [NOTHING_KEEPS_ALL],
+  };
 }
 
 function refuseSecondCost(problem: Problem): void {
@@ -101,53 +137,4 @@ function refuseSecondCost(problem: Problem): void {
     const expected = 'no second cost: the search has two objectives, benefit and cost';
     throw new ProblemError(`items[${index}].secondCost`, expected, `${secondCost}`);
   }
-}
-
-function progressOf({ front, evaluations }: SearchArchive, model: Model, of: number): SearchProgress {
-  const bestBenefit = front.size > 0 ? front.benefitAt(front.size - 1) : undefined;
-  const portfolios = (): FrontierPoint[] => portfoliosOf(front, model);
-  return { evaluations, of, kept: front.size, bestBenefit, points: () => front.points(), portfolios };
-}
-
-function portfoliosOf(front: ParetoFront, model: Model): FrontierPoint[] {
-  return front.points().map(([cost, benefit], place) => {
-    return { benefit, cost, picks: picksOf(model, front.choicesAt(place)) };
-  });
-}
-
-function resultOf(search: LocalSearch, model: Model, seed: number, stopped: boolean): SearchResult {
-  const { front, lookedAt, onceKept, evaluations } = search.archive;
-  const points = portfoliosOf(front, model);
-  return {
-    status: 'unproven',
-    stopped,
-    seed,
-    evaluations,
-    points,
-    lookedAt: lookedAt.all(),
-    onceKept: onceKept.all(),
-    counts: { lookedAt: evaluations, kept: points.length, sinceBeaten: front.sinceBeaten },
-    notes: points.length > 0 ? [] : notesOfMiss(search.nearestMiss()),
-  };
-}
-
-function notesOfMiss(broken: readonly string[]): string[] {
-  const found = 'No portfolio was found that keeps every limit and link; that there is none is not proven.';
-  return broken.length === 0
-    ? [found]
-    : [found, `The nearest one found still breaks this: ${broken.join('; ')}.`];
-}
-
-function infeasible(seed: number, notes: readonly string[]): SearchResult {
-  return {
-    status: 'infeasible',
-    stopped: false,
-    seed,
-    evaluations: 0,
-    points: [],
-    lookedAt: [],
-    onceKept: [],
-    counts: { lookedAt: 0, kept: 0, sinceBeaten: 0 },
-    notes,
-  };
 }

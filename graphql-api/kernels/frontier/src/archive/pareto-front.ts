@@ -74,6 +74,11 @@ export class ParetoFront {
     return this.choices.get(this.slotAt(place), into);
   }
 
+  /** Gives a member other choices of the same benefit and cost. */
+  rechoose(place: number, chosen: Int32Array): void {
+    this.choices.put(this.slotAt(place), chosen);
+  }
+
   /** The place of the dearest member that costs no more; -1 if there is none. */
   placeWithin(cost: number): number {
     const leaf = this.leafOf(cost);

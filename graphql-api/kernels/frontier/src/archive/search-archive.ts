@@ -53,6 +53,20 @@ export class SearchArchive {
     return true;
   }
 
+  /** Takes in the members of another front. */
+  offerAll(members: ParetoFront): void {
+    for (let place = 0; place < members.size; place++) {
+      const slot = this.front.offer(
+        members.benefitAt(place),
+        members.costAt(place),
+        members.choicesAt(place),
+      );
+      if (slot < 0) continue;
+      this.setExplored(slot, 0);
+      this.changes++;
+    }
+  }
+
   isBeaten(benefit: number, cost: number): boolean {
     const bucket = cost <= this.leastCost ? 0 : ((cost - this.leastCost) * this.bucketsPerCost) | 0;
     return benefit <= this.surelyBeaten[bucket] || this.front.bestBenefitWithin(cost) >= benefit;

@@ -3,41 +3,56 @@ import type { ProofNode, ProofTask, ProofTaskResult } from './proof-task.js';
 type Point = readonly [cost: number, benefit: number];
 
 /**
- * Hands out the tasks of a proof and takes in their results. Tasks may be done anywhere, in any order, more than once;
- * the tasks that come to be, and what each brings, are always the same: a task knows only what its parents found, and
- * what all windows together found in a first short look, which every window gets before any is looked at for long.
+ * Hands out the tasks of a proof and takes in their results, in rounds: each round every window of the axis that is
+ * still open gets some work, a little in the first and more in each that follows. Tasks of a round may be done
+ * anywhere, in any order, more than once. They know what all rounds before have found and nothing of each other, so the
+ * tasks, and what they bring, are always the same.
  */
 export class FrontierProof {
+  /** In branches of an enumeration. */
+  effort = 0;
+  private round = 0;
+  /** What is open, by window. */
+  private readonly windows: ProofNode[][];
   private readonly waiting: ProofTask[] = [];
   private readonly handedOut = new Map<string, ProofTask>();
-  /** Windows that have had their short look. */
-  private readonly looked: { readonly id: string; readonly nodes: readonly ProofNode[] }[] = [];
-  private looksDue: number;
-  effort = 0;
+  private readonly windowOf = new Map<string, number>();
+  private readonly leftOf = new Map<string, readonly ProofNode[]>();
 
-  /**
-   * @param known the points that the windows' first tasks may build on, in order of cost
-   * @param pointsNow the front with all that was found since, asked for once: when every window has been looked at
-   */
-  constructor(
-    windows: readonly ProofNode[],
-    known: readonly Point[],
-    private readonly pointsNow: () => readonly Point[],
-  ) {
-    this.looksDue = windows.length;
-    for (const [index, node] of windows.entries()) {
-      this.waiting.push({
-        id: `${index}`,
-        nodes: [node],
-        known: knownFor([node], known),
-        effort: SHORT_LOOK,
-      });
-    }
+  constructor(windows: readonly ProofNode[]) {
+    this.windows = windows.map((node) => [node]);
   }
 
-  /** Whether nothing is open: the front is complete. */
+  /** Whether all tasks of the round are done. */
+  get isRoundOver(): boolean {
+    return this.waiting.length === 0 && this.handedOut.size === 0;
+  }
+
+  /** Whether no task is being worked on. */
+  get isIdle(): boolean {
+    return this.handedOut.size === 0;
+  }
+
+  /** Whether nothing is open any more. */
   get isComplete(): boolean {
-    return this.waiting.length === 0 && this.handedOut.size === 0 && this.looksDue === 0;
+    if (!this.isRoundOver) return false;
+    for (const left of this.leftOf.values()) if (left.length > 0) return false;
+    return this.windows.every((nodes) => nodes.length === 0);
+  }
+
+  /** Begins a round with what is known by now: points in order of cost. Only when the one before is over. */
+  startRound(points: readonly Point[]): void {
+    this.collectWhatIsLeft();
+    const effort = Math.min(MOST_EFFORT, FIRST_EFFORT * EFFORT_GROWTH ** this.round);
+    for (const [window, nodes] of this.windows.entries()) {
+      for (const piece of piecesOf(nodes)) {
+        const id = `${this.round}.${this.windowOf.size}`;
+        this.windowOf.set(id, window);
+        this.waiting.push({ id, nodes: piece, known: knownFor(piece, points), effort });
+      }
+      nodes.length = 0;
+    }
+    this.round++;
   }
 
   /** A task to be worked on; undefined if there is none at the moment. */
@@ -47,67 +62,67 @@ export class FrontierProof {
     return task;
   }
 
-  /** Lets a task be handed out again whose worker was lost. */
-  putBack(id: string): void {
+  /** Lets a task be handed out again whose worker was lost, and returns it. */
+  putBack(id: string): ProofTask | undefined {
     const task = this.handedOut.get(id);
-    if (task === undefined) return;
+    if (task === undefined) return undefined;
     this.handedOut.delete(id);
     this.waiting.unshift(task);
+    return task;
   }
 
   /** Takes a result in; false if the task has been done already. */
-  accept(result: ProofTaskResult): boolean {
-    const task = this.handedOut.get(result.id);
-    if (task === undefined) return false;
-    this.handedOut.delete(result.id);
-    this.effort += result.effort;
-    if (this.looksDue > 0) this.acceptLook(result);
-    else this.waiting.push(...tasksOf(result, withFound(task.known, result)));
+  accept({ id, open, effort }: ProofTaskResult): boolean {
+    if (!this.handedOut.delete(id)) return false;
+    this.effort += effort;
+    this.leftOf.set(id, open);
     return true;
   }
 
   /** The parts of the problem in which something may still be missing. */
   openNodes(): ProofNode[] {
-    const tasks = [...this.waiting, ...this.handedOut.values()];
-    return [...this.looked, ...tasks].flatMap(({ nodes }) => nodes);
+    const tasks = [...this.waiting, ...this.handedOut.values()].flatMap(({ nodes }) => nodes);
+    return [...this.windows.flat(), ...tasks, ...[...this.leftOf.values()].flat()];
   }
 
-  private acceptLook({ id, open }: ProofTaskResult): void {
-    this.looked.push({ id, nodes: open });
-    if (--this.looksDue > 0) return;
-    const points = this.pointsNow();
-    this.looked.sort((one, other) => Number(one.id) - Number(other.id));
-    for (const { id: window, nodes } of this.looked.splice(0)) {
-      if (nodes.length > 0)
-        this.waiting.push({ id: `${window}.0`, nodes, known: knownFor(nodes, points), effort: LONG_LOOK });
-    }
+  /** Files what the round left open under its windows, in the order of the tasks, whenever their results came. */
+  private collectWhatIsLeft(): void {
+    for (const [id, window] of this.windowOf) this.windows[window].push(...(this.leftOf.get(id) ?? []));
+    this.windowOf.clear();
+    this.leftOf.clear();
   }
 }
 
-/** What is left of a task as tasks of their own, so that several can go on with it. */
-function tasksOf({ id, open }: ProofTaskResult, known: readonly Point[]): ProofTask[] {
-  const pieces = Math.min(open.length, MOST_PIECES);
-  return Array.from({ length: pieces }, (_, piece) => {
-    const nodes = open.filter((_node, place) => place % pieces === piece);
-    return { id: `${id}.${piece}`, nodes, known: knownFor(nodes, known), effort: LONG_LOOK };
-  });
+/** What is open in a window, dealt out to a few tasks so that several can go on with it. */
+function piecesOf(nodes: readonly ProofNode[]): ProofNode[][] {
+  const pieces = Math.min(nodes.length, MOST_PIECES);
+  return Array.from({ length: pieces }, (_, piece) =>
+    nodes.filter((_node, place) => place % pieces === piece),
+  );
 }
 
 /** The points in the stretches of some nodes, and the last one before. */
 function knownFor(nodes: readonly ProofNode[], points: readonly Point[]): Point[] {
-  const from = Math.min(...nodes.map((node) => node.from));
-  const to = Math.max(...nodes.map((node) => node.to));
-  const within = points.filter(([cost]) => cost <= to);
-  const firstInside = within.findIndex(([cost]) => cost > from);
-  return within.slice(firstInside < 0 ? -1 : Math.max(0, firstInside - 1));
+  const from = nodes.reduce((least, node) => Math.min(least, node.from), Infinity);
+  const to = nodes.reduce((most, node) => Math.max(most, node.to), -Infinity);
+  const firstInside = placeAfter(points, from);
+  return points.slice(Math.max(0, firstInside - 1), placeAfter(points, to));
 }
 
-function withFound(known: readonly Point[], { found }: ProofTaskResult): Point[] {
-  const points = [...known, ...found.map(({ cost, benefit }): Point => [cost, benefit])];
-  return points.sort(([one], [other]) => one - other);
+/** Place of the first point that costs more. */
+function placeAfter(points: readonly Point[], cost: number): number {
+  let low = 0;
+  let high = points.length;
+  while (low < high) {
+    const middle = (low + high) >> 1;
+    if (points[middle][0] <= cost) low = middle + 1;
+    else high = middle;
+  }
+  return low;
 }
 
-/** Efforts in branches of an enumeration: some milliseconds, and about a second. */
-const SHORT_LOOK = 6_000;
-const LONG_LOOK = 1_000_000;
+/** Efforts in branches of an enumeration: at first some milliseconds a window, later about a second a task. */
+const FIRST_EFFORT = 6_000;
+const EFFORT_GROWTH = 16;
+const MOST_EFFORT = 2_000_000;
 const MOST_PIECES = 8;

@@ -9,8 +9,13 @@ import type { Stretch, Tangent } from './step-line.js';
 export interface Opening {
   /** The axis of cost in windows, each with a tangent; where there are none, no portfolio is possible. */
   readonly windows: readonly ProofNode[];
-  /** The best options at the tangent of each window, by class of the model, with its price of cost: starts for a search. */
-  readonly starts: readonly { readonly chosen: Int32Array; readonly price: number }[];
+  readonly starts: readonly ProofStart[];
+}
+
+/** The best options at the tangent of a window, by class of the model, with its price of cost: a start for a search. */
+export interface ProofStart {
+  readonly chosen: Int32Array;
+  readonly price: number;
 }
 
 /**
@@ -22,7 +27,7 @@ export function openProof(model: Model, { from, to }: Stretch): Opening {
   if (!whole) return { windows: [], starts: [] };
   const relaxation = new Relaxation(whole);
   const windows: ProofNode[] = [];
-  const starts: { chosen: Int32Array; price: number }[] = [];
+  const starts: ProofStart[] = [];
   const widest = (whole.to - whole.from) / LEAST_WINDOWS;
   const cut = (stretch: Stretch, depth: number): void => {
     const middle = Math.floor((stretch.from + stretch.to) / 2);

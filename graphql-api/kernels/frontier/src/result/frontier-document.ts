@@ -1,6 +1,6 @@
 import { hypervolume } from '../archive/hypervolume.js';
 import type { Problem } from '../problem/problem.js';
-import type { FrontierPoint, SearchResult } from '../search.js';
+import type { FrontierPoint, ProvenSoFar, SearchResult } from '../search.js';
 
 /** A search's outcome, format `metewand-frontier/1`. */
 export interface FrontierDocument {
@@ -17,12 +17,12 @@ export interface FrontierDocument {
   readonly notes: readonly string[];
 }
 
-/** What is proven about the points. The search proves nothing, so `bound` and `provenStretches` are empty. */
-export interface Certificate {
+/** What is proven about the points; with the status `unproven`, nothing. */
+export interface Certificate extends ProvenSoFar {
   readonly status: SearchResult['status'];
-  readonly provenStretches: readonly (readonly [fromCost: number, toCost: number])[];
-  readonly bound: readonly (readonly [cost: number, benefit: number])[];
   readonly hypervolume: number;
+  /** The hypervolume of the bound: that of the whole front is no larger. Missing where nothing is proven. */
+  readonly hypervolumeBound?: number;
   /** The corner the hypervolume is measured from: no benefit, at the ceiling or else at the dearest point. */
   readonly reference: { readonly benefit: number; readonly cost: number };
   /** Present where the run ended before it was done. */
@@ -53,9 +53,10 @@ export function toFrontierDocument(
     points: result.points,
     certificate: {
       status: result.status,
-      provenStretches: [],
-      bound: [],
+      provenStretches: result.provenStretches,
+      bound: result.bound,
       hypervolume: hypervolume(steps, reference),
+      ...(result.bound.length > 0 ? { hypervolumeBound: hypervolume(result.bound, reference) } : {}),
       reference,
       ...(result.stopped ? { stopped: true as const } : {}),
     },
