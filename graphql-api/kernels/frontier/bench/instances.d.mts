@@ -5,7 +5,7 @@ export interface InstanceOptions {
   readonly seed: number;
   readonly capacities?: number;
   readonly addedBenefit?: number;
-  readonly money?: 'small' | 'minor';
+  readonly money?: 'small' | 'minor' | 'tens';
 }
 
 export function anInstance(options: InstanceOptions): Problem;

@@ -9,7 +9,7 @@ import { Random } from '@metewand/frontier';
  * @param alternatives how many items
  * @param capacities how many limits
  * @param addedBenefit if given, benefit is cost plus this constant: strongly correlated, the hard family
- * @param money `small`: tens to hundreds; `minor`: a hundred times that and odd cents
+ * @param money `small`: up to some hundreds; `minor`: a hundred times that and odd cents; `tens`: a tenth of it
  */
 export function anInstance({ alternatives, seed, capacities = 3, addedBenefit, money = 'small' }) {
   const draw = drawFrom(seed);
@@ -23,11 +23,11 @@ export function anInstance({ alternatives, seed, capacities = 3, addedBenefit, m
   }));
   const choices = drawChoices(draw, drawn, ceiling);
   if (addedBenefit !== undefined) for (const item of drawn) item.benefit = item.cost + addedBenefit;
-  if (money === 'minor') for (const item of drawn) item.cost = 100 * item.cost + draw.whole(-49, 50);
+  for (const item of drawn) item.cost = costIn(money, item.cost, draw);
   return {
     format: 'metewand-problem/1',
     name: nameOf({ alternatives, seed, capacities, addedBenefit, money }),
-    ceiling: money === 'minor' ? 100 * ceiling : ceiling,
+    ceiling: Math.round(UNITS[money] * ceiling),
     limits,
     items: drawn.map(itemOf),
     ...choices,
@@ -38,11 +38,17 @@ export function anInstance({ alternatives, seed, capacities = 3, addedBenefit, m
 /** An instance's description in one line. */
 export function nameOf({ alternatives, seed, capacities = 3, addedBenefit, money = 'small' }) {
   const kind = addedBenefit === undefined ? '' : `, benefit = cost + ${addedBenefit}`;
-  const units = money === 'minor' ? ', money in minor units' : '';
+  const units = money === 'small' ? '' : `, money in ${money === 'minor' ? 'minor units' : 'tens'}`;
   return `${alternatives} alternatives, ${capacities} capacities${kind}${units}, seed ${seed}`;
 }
 
 const DEPARTMENTS = 4;
+const UNITS = { small: 1, minor: 100, tens: 0.1 };
+
+function costIn(money, cost, draw) {
+  if (money === 'minor') return UNITS.minor * cost + draw.whole(-49, 50);
+  return Math.max(1, Math.round(UNITS[money] * cost));
+}
 
 /** @returns numbers by seed: `between` real, `whole` with both ends included, `chance` true in so many of 1. */
 export function drawFrom(seed) {
