@@ -80,24 +80,26 @@ export class DominanceTree {
     return false;
   }
 
-  /** The least third figure of a point that is as low or lower in the first two; infinity if there is none. */
-  leastThird(x: number, y: number): number {
+  /** The slots of all points that are as low or lower in all three figures. */
+  slotsCovering(x: number, y: number, z: number): number[] {
     const { boxes, lefts, counts, figures, leafSlots } = this.tree;
-    let least = Infinity;
+    const covering: number[] = [];
     const open = [ROOT];
     for (let node = open.pop(); node !== undefined; node = open.pop()) {
       const box = 6 * node;
-      if (counts[node] === 0 || boxes[box] > x || boxes[box + 1] > y || boxes[box + 2] >= least) continue;
+      if (boxes[box] > x || boxes[box + 1] > y || boxes[box + 2] > z) continue;
       if (lefts[node] >= 0) {
         open.push(lefts[node], lefts[node] + 1);
         continue;
       }
       for (let at = LEAF * node; at < LEAF * node + counts[node]; at++) {
         const point = 3 * leafSlots[at];
-        if (figures[point] <= x && figures[point + 1] <= y) least = Math.min(least, figures[point + 2]);
+        if (figures[point] <= x && figures[point + 1] <= y && figures[point + 2] <= z) {
+          covering.push(leafSlots[at]);
+        }
       }
     }
-    return least;
+    return covering;
   }
 
   /** Takes in a point that none covers, under a slot no other has, and drops those that it covers. */

@@ -1,4 +1,5 @@
 import { ChoiceStore } from '../archive/choice-store.js';
+import { risingPart } from './bound-line.js';
 import { DominanceTree } from './dominance-tree.js';
 
 /**
@@ -8,6 +9,7 @@ import { DominanceTree } from './dominance-tree.js';
 export class ParetoSurface {
   private readonly tree = new DominanceTree((slot) => this.release(slot));
   private readonly choices: ChoiceStore;
+  private readonly classCount: number;
   private readonly freeSlots: number[] = [];
   private slotsUsed = 0;
   private member = new Uint8Array(256);
@@ -22,6 +24,7 @@ export class ParetoSurface {
     private readonly onBeaten: (benefit: number, cost: number) => void = () => undefined,
   ) {
     this.choices = new ChoiceStore(optionStart);
+    this.classCount = optionStart.length - 1;
   }
 
   get size(): number {
@@ -69,7 +72,7 @@ export class ParetoSurface {
 
   /** The chosen option of each class of a member, as an array of its own. */
   choicesOf(slot: number): Int32Array {
-    return this.choices.get(slot);
+    return this.choices.get(slot, new Int32Array(this.classCount));
   }
 
   /** Whether a member is at least as good in all three figures. */
@@ -84,7 +87,15 @@ export class ParetoSurface {
 
   /** The least second cost of a member that is at least as good in benefit and cost; infinity if there is none. */
   leastSecondCost(benefit: number, cost: number): number {
-    return this.tree.leastThird(-benefit, cost);
+    const slots = this.tree.slotsCovering(-benefit, cost, Infinity);
+    return slots.reduce((least, slot) => Math.min(least, this.secondCostOf(slot)), Infinity);
+  }
+
+  /** The front in benefit and cost of the members at least as good as these figures, in order of cost. */
+  frontWithin(benefit: number, cost: number, secondCost: number): [cost: number, benefit: number][] {
+    const slots = this.tree.slotsCovering(-benefit, cost, secondCost);
+    const points = slots.map((slot): [number, number] => [this.costOf(slot), this.benefitOf(slot)]);
+    return risingPart(points);
   }
 
   /**
