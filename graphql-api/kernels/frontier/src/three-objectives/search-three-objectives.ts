@@ -1,3 +1,4 @@
+import { NOTHING_KEEPS_ALL } from '../frontier-search.js';
 import { explainInfeasible } from '../explain/explain-infeasible.js';
 import { compileModel } from '../model/compile-model.js';
 import type { Model } from '../model/model.js';
@@ -8,25 +9,17 @@ import type { SurfacePoint } from './dominated-volume.js';
 import type { ParetoSurface } from './pareto-surface.js';
 import { boundOf } from './surface-bound.js';
 import { exactSliceSearch, type SliceSearch } from './slice-search.js';
-import { SurfaceProof, type ProofEffort } from './surface-proof.js';
+import { SurfaceProof } from './surface-proof.js';
 import { SurfaceSearch } from './surface-search.js';
-
-export interface ThreeObjectivesSettings extends SearchSettings {
-  /** What the proof may do; a thousand million branches, twenty million at a time, if left out. */
-  readonly proof?: ProofEffort;
-}
 
 export interface ThreeObjectivesPoint extends FrontierPoint {
   readonly secondCost: number;
 }
 
 /** What searchFrontier gives, for three objectives. Plain data. */
-export interface ThreeObjectivesResult extends Omit<SearchResult, 'status' | 'points'> {
-  readonly status: 'complete' | 'bounded' | 'unproven' | 'infeasible';
+export interface ThreeObjectivesResult extends SearchResult {
   /** In order of cost, of equal ones in order of second cost; none is matched or beaten by another in all three. */
   readonly points: readonly ThreeObjectivesPoint[];
-  /** Steps [cost, benefit]: no feasible portfolio of at most that cost has more benefit, at any second cost. */
-  readonly bound: readonly (readonly [cost: number, benefit: number])[];
   /** Every feasible portfolio is matched or beaten in all three by one of these; empty if nothing is proven. */
   readonly surfaceBound: readonly SurfacePoint[];
   /** Closed intervals of second cost in which no point is missing, from the highest down. */
@@ -40,7 +33,7 @@ export interface ThreeObjectivesResult extends Omit<SearchResult, 'status' | 'po
  */
 export function* searchThreeObjectives(
   problem: Problem,
-  settings: ThreeObjectivesSettings = {},
+  settings: SearchSettings = {},
   sliceSearch: (problem: Problem) => SliceSearch = exactSliceSearch,
 ): Generator<SearchProgress, ThreeObjectivesResult, StopSearch | undefined> {
   const { seed = 1, evaluations = 20_000_000, reportEvery = 250_000, lookedAtSample = 20_000 } = settings;
@@ -49,12 +42,7 @@ export function* searchThreeObjectives(
   if (reasons.length > 0 || model === undefined) return infeasible(seed, reasons);
 
   const search = new SurfaceSearch(model, seed, lookedAtSample);
-  const proof = new SurfaceProof(
-    model,
-    search.archive,
-    sliceSearch(problem),
-    settings.proof ?? DEFAULT_EFFORT,
-  );
+  const proof = new SurfaceProof(model, search.archive, sliceSearch(problem), settings.effort ?? Infinity);
   const of = Math.min(evaluations, sensibleEvaluations(model));
   const progress = (): SearchProgress => progressOf(search, proof, model);
   // the bound comes early, the long proof last: a run that is stopped in between has both points and a gap
@@ -66,11 +54,9 @@ export function* searchThreeObjectives(
   return resultOf(search, proof, model, seed, cutShort);
 }
 
-const DEFAULT_EFFORT: ProofEffort = { total: 1_000_000_000, atATime: 20_000_000 };
-
 /** Where the surface is small, going down from the widest slice is soon done. */
 function sliceCount({ archive }: SurfaceSearch): number {
-  return Math.min(64, archive.surface.size / 32);
+  return Math.min(256, archive.surface.size / 128);
 }
 
 function* searchUntil(
@@ -115,7 +101,7 @@ function progressOf({ archive }: SurfaceSearch, proof: SurfaceProof, model: Mode
     bestBenefit: surface.mostBenefit,
     points: () => Array.from(surface.slots(), (slot) => [surface.costOf(slot), surface.benefitOf(slot)]),
     portfolios: () => pointsOf(surface, model),
-    proven: () => ({ bound: proof.layers[0]?.line ?? [], provenStretches: [] }),
+    proven: () => ({ bound: proof.line, provenStretches: proof.provenStretches }),
   };
 }
 
@@ -138,7 +124,7 @@ function resultOf(
   const { surface, lookedAt, onceKept, evaluations } = search.archive;
   const points = pointsOf(surface, model);
   if (proof.isComplete && points.length === 0) {
-    return infeasible(seed, ['No portfolio keeps every limit and link; this is proven.'], evaluations);
+    return infeasible(seed, [NOTHING_KEEPS_ALL], evaluations);
   }
   const { layers } = proof;
   const bounded = layers.length > 0 ? 'bounded' : 'unproven';
@@ -148,8 +134,8 @@ function resultOf(
     seed,
     evaluations,
     points,
-    bound: layers[0]?.line ?? [],
-    provenStretches: [],
+    bound: proof.line,
+    provenStretches: proof.provenStretches,
     surfaceBound: boundOf(
       layers,
       points.map(({ cost, benefit, secondCost }) => [cost, benefit, secondCost]),
