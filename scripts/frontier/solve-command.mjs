@@ -34,10 +34,11 @@ function interruption() {
   return () => interrupted;
 }
 
-function inWords({ evaluations, of, kept, bestBenefit }) {
-  const millions = (count) => (count / 1e6).toFixed(1);
-  const best = bestBenefit === undefined ? 'none found yet' : `${kept} kept, best benefit ${bestBenefit}`;
-  return `${millions(evaluations)} of ${millions(of)} million looked at, ${best}`;
+function inWords({ evaluations, kept, bestBenefit, proven }) {
+  const best = bestBenefit === undefined ? 'none kept yet' : `${kept} kept, best benefit ${bestBenefit}`;
+  const { bound, provenStretches } = proven();
+  const open = bound.length === 0 ? '' : `, ${provenStretches.length} stretches of cost proven`;
+  return `${(evaluations / 1e6).toFixed(1)} million looked at, ${best}${open}`;
 }
 
 /** JSON with one key to a line, and in `points` one point to a line. */

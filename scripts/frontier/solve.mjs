@@ -10,7 +10,8 @@ export async function solve(
   { seed, threads, seconds = Infinity, onProgress, isStopped = () => false },
 ) {
   const deadline = performance.now() + 1000 * seconds;
-  const search = searchFrontier(problem, { seed, threads });
+  // often enough for a deadline and for Ctrl-C; the result is the same however often
+  const search = searchFrontier(problem, { seed, threads, reportEvery: 50_000 });
   let step = search.next();
   while (!step.done) {
     onProgress?.(step.value);
