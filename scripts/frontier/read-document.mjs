@@ -17,9 +17,22 @@ export function readDocument(file, parse) {
   try {
     return parse(json);
   } catch (error) {
-    if (!(error instanceof ProblemError)) throw error;
-    throw fault(file, text, offsetOfField(text, error.path), error.path, error.expected, error.found);
+    throw faultOf(error, file, text);
   }
+}
+
+/** Does something with what was read from a file: what the kernel refuses only then is a FileFault just the same. */
+export async function usingDocument(file, work) {
+  try {
+    return await work();
+  } catch (error) {
+    throw error instanceof ProblemError ? faultOf(error, file, readText(file)) : error;
+  }
+}
+
+function faultOf(error, file, text) {
+  if (!(error instanceof ProblemError)) return error;
+  return fault(file, text, offsetOfField(text, error.path), error.path, error.expected, error.found);
 }
 
 function readText(file) {

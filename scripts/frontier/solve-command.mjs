@@ -1,7 +1,7 @@
 import { parseProblem, toFrontierDocument } from '@metewand/frontier';
 import { fingerprintOf } from './fingerprint.mjs';
 import { ProgressLine } from './progress-line.mjs';
-import { readDocument } from './read-document.mjs';
+import { readDocument, usingDocument } from './read-document.mjs';
 import { solve } from './solve.mjs';
 
 /** Writes the frontier of a problem on standard output. Ctrl-C ends the search, and what was found is written. */
@@ -9,13 +9,9 @@ export async function solveCommand({ problemPath, seconds, seed, threads }) {
   const problem = readDocument(problemPath, parseProblem);
   const wasInterrupted = interruption();
   const progress = new ProgressLine();
-  const result = await solve(problem, {
-    seed,
-    threads,
-    seconds,
-    isStopped: wasInterrupted,
-    onProgress: (report) => progress.show(() => inWords(report)),
-  });
+  const onProgress = (report) => progress.show(() => inWords(report));
+  const settings = { seed, threads, seconds, isStopped: wasInterrupted, onProgress };
+  const result = await usingDocument(problemPath, () => solve(problem, settings));
   progress.end(`${result.points.length} points, ${result.status}${result.stopped ? ', stopped' : ''}`);
   if (wasInterrupted() && result.points.length === 0) return 130;
   const facts = {
