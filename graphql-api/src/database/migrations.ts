@@ -12,6 +12,7 @@ import { Selections1764600011000 } from './migrations/11-selections.js';
 import { Letters1764600012000 } from './migrations/12-letters.js';
 import { Jobs1764600013000 } from './migrations/13-jobs.js';
 import { PatientJobs1764600014000 } from './migrations/14-patient-jobs.js';
+import { RunEffort1764600015000 } from './migrations/15-run-effort.js';
 
 /** In the order in which they are run. */
 export const migrations = [
@@ -29,4 +30,5 @@ export const migrations = [
   Letters1764600012000,
   Jobs1764600013000,
   PatientJobs1764600014000,
+  RunEffort1764600015000,
 ];

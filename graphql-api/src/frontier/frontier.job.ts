@@ -32,8 +32,8 @@ export class FrontierJob implements HandlesJob<'frontier.search'>, BeforeApplica
   }
 
   private async search(run: HeldRun) {
-    const { problem, seed, evaluations, seenEvaluations } = run;
-    const search = new SearchHost({ problem, seed, evaluations, leastEvaluations: seenEvaluations });
+    const { problem, seed, evaluations, effort, seenEvaluations } = run;
+    const search = new SearchHost({ problem, seed, evaluations, effort, leastEvaluations: seenEvaluations });
     const keeper = new LeaseKeeper(this.leases, run, search);
     let abandoned = false;
     const handBack = AsyncResource.bind(async () => {

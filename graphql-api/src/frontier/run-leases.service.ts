@@ -14,6 +14,7 @@ export interface HeldRun {
   problem: Problem;
   seed: number;
   evaluations: number;
+  effort: number;
   /** How far somebody has seen this run before. */
   seenEvaluations: number;
 }
@@ -37,6 +38,7 @@ export class RunLeasesService {
                 lease_until = now() + make_interval(secs => $2)
          where id = $1 and (state = 'WAITING' or (state = 'SEARCHING' and lease_until < now()))
          returning id, attempt, problem, seed, evaluations::float8 as evaluations,
+                   effort::float8 as effort,
                    coalesce((progress->>'evaluations')::float8, 0) as "seenEvaluations"`,
         [runId, LEASE_SECONDS],
       );

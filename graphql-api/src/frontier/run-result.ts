@@ -43,22 +43,38 @@ export interface RunPointRow {
 
 export type ChartPair = readonly [cost: number, benefit: number];
 
+/** What is proven of a front. */
+export interface RunProofRow {
+  /** Steps that no portfolio passes, rising in both figures. */
+  bound: ChartPair[];
+  /** Stretches of cost in which nothing is missing, both ends included. */
+  provenStretches: [from: number, to: number][];
+  /** Of the axis between the cheapest portfolio there may be and the dearest, 0 to 1. */
+  provenShare: number;
+  /** In benefit times cost, from no benefit and the end of the axis. */
+  hypervolume: number;
+  /** The same of the bound: that of the whole front is no larger. */
+  hypervolumeBound: number;
+}
+
 /** Where a search is: column `progress`. */
 export interface RunProgressRow {
   evaluations: number;
-  of: number;
   kept: number;
   points: RunPointRow[];
+  /** Missing while nothing is proven. */
+  proof?: RunProofRow;
 }
 
 /** What a search found: column `result`. */
 export interface RunResultRow {
-  status: 'UNPROVEN' | 'INFEASIBLE';
+  status: 'COMPLETE' | 'BOUNDED' | 'UNPROVEN' | 'INFEASIBLE';
   stopped: boolean;
   evaluations: number;
-  of: number;
   /** In order of cost, rising in both figures. */
   points: RunPointRow[];
+  /** Missing where nothing is proven. */
+  proof?: RunProofRow;
   kneeIndex: number | null;
   lookedAt: ChartPair[];
   onceKept: ChartPair[];
@@ -71,6 +87,7 @@ export interface SearchOrder {
   problem: Problem;
   seed: number;
   evaluations: number;
+  effort: number;
   /** A stop counts only from here on: somebody has seen a front this far already. */
   leastEvaluations: number;
   /** One integer, 1 to stop. */

@@ -10,7 +10,14 @@ import {
   type RunPoint,
   type RunProgress,
 } from './models/run-parts.model.js';
-import type { ChartPair, RunInput, RunPointRow, RunProgressRow, RunResultRow } from './run-result.js';
+import type {
+  ChartPair,
+  RunInput,
+  RunPointRow,
+  RunProgressRow,
+  RunProofRow,
+  RunResultRow,
+} from './run-result.js';
 
 /** From a run's rows to what the API shows. */
 
@@ -23,7 +30,13 @@ export function itemViews({ items, currency }: RunInput): RunItem[] {
   }));
 }
 
-export function pointViews(points: readonly RunPointRow[], input: RunInput, costAxis: CostAxis): RunPoint[] {
+export function pointViews(
+  at: RunProgressRow | RunResultRow | null,
+  input: RunInput,
+  costAxis: CostAxis,
+): RunPoint[] {
+  const { points = [], proof } = at ?? {};
+  const boundOf = proof && boundAtRisingCosts(proof);
   return points.map((point) => ({
     benefit: formatPoints(point.benefit),
     cost: toMoneyModel(point.cost, input.currency),
@@ -32,7 +45,17 @@ export function pointViews(points: readonly RunPointRow[], input: RunInput, cost
       input.currency,
     ),
     picks: point.picks,
+    atMostMore: boundOf ? formatPoints(boundOf(point.cost) - point.benefit) : null,
   }));
+}
+
+/** Answers the bound at a cost. The costs asked for must rise, so that all steps are passed but once. */
+function boundAtRisingCosts({ bound }: RunProofRow): (cost: number) => number {
+  let next = 0;
+  return (cost) => {
+    while (next < bound.length && bound[next][0] <= cost) next += 1;
+    return bound[next - 1]?.[1] ?? 0;
+  };
 }
 
 function capitalOfPoint({ picks }: RunPointRow, { items }: RunInput): number {
@@ -46,7 +69,7 @@ export function progressView(at: RunProgressRow | RunResultRow): RunProgress {
     kept: at.points.length,
     lookedAt: at.evaluations,
     bestBenefit: best ? formatPoints(best.benefit) : null,
-    share: at.of > 0 ? Math.min(1, at.evaluations / at.of) : 1,
+    share: provenShare(at),
   };
 }
 
@@ -58,12 +81,33 @@ export function chartView(pairs: readonly ChartPair[], currency: string): ChartP
   };
 }
 
-/** The search is a heuristic: it proves nothing but that there is no portfolio at all. */
-export function certificateView(result: RunResultRow | null): RunCertificate {
+/** While a search goes on, what it has proven so far. */
+export function certificateView(
+  at: RunProgressRow | RunResultRow | null,
+  { currency }: RunInput,
+): RunCertificate {
+  const unit = 10 ** minorDigits(currency);
+  const { proof } = at ?? {};
   return {
-    status: result?.status === 'INFEASIBLE' ? CertificateStatus.INFEASIBLE : CertificateStatus.UNPROVEN,
-    provenStretches: [],
-    bound: { costs: [], benefits: [] },
-    gapPercent: null,
+    status: certificateStatus(at),
+    provenStretches: (proof?.provenStretches ?? []).map(([from, to]) => [from / unit, to / unit]),
+    bound: chartView(proof?.bound ?? [], currency),
+    gapPercent: proof ? 100 * gapOf(proof) : null,
+    provenShare: at ? provenShare(at) : 0,
   };
+}
+
+export function certificateStatus(at: RunProgressRow | RunResultRow | null): CertificateStatus {
+  if (at && 'status' in at) return CertificateStatus[at.status];
+  return at?.proof ? CertificateStatus.BOUNDED : CertificateStatus.UNPROVEN;
+}
+
+function provenShare(at: RunProgressRow | RunResultRow): number {
+  if ('status' in at && at.status === 'INFEASIBLE') return 1;
+  return at.proof?.provenShare ?? 0;
+}
+
+/** The share of the bound's hypervolume that the front does not reach: it may all be missing, or none of it. */
+function gapOf({ hypervolume, hypervolumeBound }: RunProofRow): number {
+  return hypervolumeBound > 0 ? 1 - hypervolume / hypervolumeBound : 0;
 }

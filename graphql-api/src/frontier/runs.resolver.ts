@@ -70,7 +70,8 @@ export class RunsResolver {
 
   @ResolveField(() => RunCertificate)
   async certificate(@Parent() { id }: Run) {
-    return certificateView((await this.detailsById.load(id)).result);
+    const { items, progress, result } = await this.detailsById.load(id);
+    return certificateView(result ?? progress, items);
   }
 
   @ResolveField(() => [String])
@@ -91,7 +92,7 @@ export class RunsResolver {
   @ResolveField(() => [RunPoint], { description: 'In order of cost: the best so far, then the result.' })
   async points(@Parent() { id, costAxis }: Run) {
     const { items, progress, result } = await this.detailsById.load(id);
-    return pointViews((result ?? progress)?.points ?? [], items, costAxis);
+    return pointViews(result ?? progress, items, costAxis);
   }
 
   @ResolveField(() => Int, {

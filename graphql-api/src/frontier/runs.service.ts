@@ -14,7 +14,7 @@ import type { StartSearchInput } from './dto/start-search.input.js';
 import { LimitsCollide, NothingToSearch, SearchAlreadyRunning } from './dto/start-search.result.js';
 import { Run, RunState } from './entities/run.entity.js';
 import { ProblemService, UnsearchableError, type FrozenProblem } from './problem.service.js';
-import { DEFAULT_SEED, EVALUATIONS } from './search-settings.js';
+import { DEFAULT_SEED, EFFORT, EVALUATIONS } from './search-settings.js';
 
 const UNDER_WAY = [RunState.WAITING, RunState.SEARCHING];
 
@@ -97,6 +97,7 @@ export class RunsService {
         state: RunState.WAITING,
         seed,
         evaluations: EVALUATIONS,
+        effort: EFFORT,
         problem,
         items,
         fingerprint,

@@ -1,5 +1,8 @@
-/** Portfolios a search looks at before it ends. */
+/** Portfolios the local search of a run looks at before it leaves the field to the proof. */
 export const EVALUATIONS = 20_000_000;
+
+/** Branches the proof of a run looks at before it ends with a bound: some ten minutes of one core. */
+export const EFFORT = 4_000_000_000;
 
 export const DEFAULT_SEED = 1;
 

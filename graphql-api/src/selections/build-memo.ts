@@ -1,7 +1,7 @@
 import { totalsOf } from '@metewand/frontier';
 import { toMoneyModel } from '../common/models/money.model.js';
 import { capitalOf } from '../costing/round-costs.service.js';
-import { certificateView } from '../frontier/run-views.js';
+import { certificateStatus } from '../frontier/run-views.js';
 import { spendableMinor } from '../rounds/spendable.js';
 import { formatPoints } from '../scoring/points.js';
 import { memoAssumptions } from './memo-assumptions.js';
@@ -24,7 +24,7 @@ export function buildMemo(source: MemoSource): Memo {
     roundName: round.name,
     runNumber: run.number,
     costAxis: run.costAxis,
-    certificateStatus: certificateView(result).status,
+    certificateStatus: certificateStatus(result),
     capital: toMoneyModel(capitalMinor, currency),
     lifeCycleCost: toMoneyModel(lifeCycleCostMinor, currency),
     benefit: formatPoints(totalsOf(problem, picksOf(source)).benefit),

@@ -14,7 +14,7 @@ export function memoCautions(source: MemoSource, uses: readonly LimitUse[]): Mem
     ...quotesEndingSoon(source),
     ...limitsNearlyUsed(uses),
     ...scoresMissing(source),
-    notProven(source),
+    ...notProven(source),
     ...siteNeeds(source),
     {
       title: 'Recalls and registration',
@@ -77,13 +77,16 @@ function missingOf({ benefits }: MemoSource, candidateId: string): number {
   return benefits.get(candidateId)?.missingScores ?? 0;
 }
 
-function notProven({ run, result }: MemoSource): MemoCaution {
+function notProven({ run, result }: MemoSource): MemoCaution[] {
+  if (result.status === 'COMPLETE') return [];
   const lookedAt = result.counts.lookedAt.toLocaleString('en-GB').replaceAll(',', '\u00a0');
   const ended = result.stopped ? 'It was stopped before its end. ' : '';
-  return {
-    title: 'The search is not proven complete',
-    text: `${ended}Run ${run.number} looked at ${lookedAt} portfolios and found none that has more benefit at no more cost. It is not proven that there is none.`,
-  };
+  return [
+    {
+      title: 'The search is not proven complete',
+      text: `${ended}Run ${run.number} looked at ${lookedAt} portfolios and found none that has more benefit at no more cost. It is not proven that there is none.`,
+    },
+  ];
 }
 
 function siteNeeds(source: MemoSource): MemoCaution[] {

@@ -46,9 +46,13 @@ export class Run {
   @Column('int')
   seed: number;
 
-  @Field(() => Float, { description: 'Portfolios it may look at.' })
+  @Field(() => Float, { description: 'Portfolios that its local search may look at.' })
   @Column('bigint', { transformer: safeInteger })
   evaluations: number;
+
+  @Field(() => Float, { description: 'Branches that its proof may look at.' })
+  @Column('bigint', { transformer: safeInteger })
+  effort: number;
 
   @Field({ description: 'SHA-256 of the frozen problem.' })
   @Column('text')

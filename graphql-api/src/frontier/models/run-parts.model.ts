@@ -12,7 +12,7 @@ export enum CertificateStatus {
 registerEnumType(CertificateStatus, {
   name: 'CertificateStatus',
   description:
-    'How far it is proven that the front is all there is. UNPROVEN: nothing better was found, no more.',
+    'How far it is proven that the front is all there is. BOUNDED: nothing lies above the bound. UNPROVEN: nothing better was found, no more.',
 });
 
 @ObjectType({ description: 'One portfolio of a front.' })
@@ -28,6 +28,13 @@ export class RunPoint {
 
   @Field(() => [Int], { description: 'Indices of the run’s items.' })
   picks: number[];
+
+  @Field(() => DecimalScalar, {
+    nullable: true,
+    description:
+      'No portfolio of at most this cost has more benefit than so much more; empty while nothing is proven.',
+  })
+  atMostMore: string | null;
 }
 
 @ObjectType({ description: 'A candidate by its quote in force, as frozen when the run was started.' })
@@ -107,7 +114,7 @@ export class RunProgress {
   @Field(() => DecimalScalar, { nullable: true })
   bestBenefit: string | null;
 
-  @Field(() => Float, { description: 'Of the evaluations it may use, 0 to 1.' })
+  @Field(() => Float, { description: 'How much of the cost axis is proven, 0 to 1.' })
   share: number;
 }
 
@@ -122,6 +129,12 @@ export class RunCertificate {
   @Field(() => ChartPoints, { description: 'Steps that no portfolio passes; empty while nothing is proven.' })
   bound: ChartPoints;
 
-  @Field(() => Float, { nullable: true })
+  @Field(() => Float, {
+    nullable: true,
+    description: 'At most so much of the area below the bound is missing; empty while nothing is proven.',
+  })
   gapPercent: number | null;
+
+  @Field(() => Float, { description: 'How much of the cost axis lies in proven stretches, 0 to 1.' })
+  provenShare: number;
 }
