@@ -31,6 +31,7 @@ export class FrontierSearch {
   private proof: FrontierProof | undefined;
   private starts: ProofStart[] = [];
 
+  private readonly firstEvaluations: number;
   /** Evaluations at which the local search makes way for the proof. */
   private searchUntil: number;
   private round = 0;
@@ -51,7 +52,11 @@ export class FrontierSearch {
     this.front = new ProvenFront(model);
     this.to = model.ceiling < Infinity ? model.ceiling : this.search.archive.mostCost;
     this.step = precisionOf(model).step;
-    this.searchUntil = Math.min(FIRST_EVALUATIONS, this.mostEvaluations);
+    this.firstEvaluations = Math.min(
+      MOST_FIRST_EVALUATIONS,
+      EVALUATIONS_PER_OPTION * model.optionCost.length,
+    );
+    this.searchUntil = Math.min(this.firstEvaluations, this.mostEvaluations);
   }
 
   /** Whether all is proven, or the settings allow no more. */
@@ -164,7 +169,7 @@ export class FrontierSearch {
     } else if (!this.isMerged) {
       search.archive.offerAll(front.front);
       this.isMerged = true;
-      const evaluations = FIRST_EVALUATIONS * EVALUATIONS_GROWTH ** this.round;
+      const evaluations = this.firstEvaluations * EVALUATIONS_GROWTH ** this.round;
       this.searchUntil = Math.min(this.mostEvaluations, search.archive.evaluations + evaluations);
     } else if (this.isProofSpent) {
       this.searchUntil = this.mostEvaluations;
@@ -209,12 +214,13 @@ export class FrontierSearch {
 function sensibleEvaluations({ classCount, optionStart }: Model): number {
   let portfolios = 1;
   for (let k = 0; k < classCount; k++) portfolios *= optionStart[k + 1] - optionStart[k];
-  return Math.max(50_000, 64 * portfolios);
+  return Math.max(1_000, 64 * portfolios);
 }
 
 export const NOTHING_KEEPS_ALL = 'No portfolio keeps all limits and links together.';
 
-const FIRST_EVALUATIONS = 200_000;
+const EVALUATIONS_PER_OPTION = 1_000;
+const MOST_FIRST_EVALUATIONS = 500_000;
 const EVALUATIONS_GROWTH = 5;
 const FIRST_REPORT = 4_000;
 /** Evaluations at a time: a few milliseconds, so that the host can have its say. */

@@ -67,3 +67,4 @@ export { solveBySearch } from './explain/solve-by-search.js';
 export { whyLeftOut, type LeftOut, type Obstacle } from './explain/why-left-out.js';
 export { reduceProblem, type Reduced } from './reduction/reduce-problem.js';
 export type { Reduction } from './reduction/reduction.js';
+export { alternativesAt, type Alternatives, type AlternativesSettings } from './proof/alternatives.js';

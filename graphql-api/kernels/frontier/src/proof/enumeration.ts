@@ -1,16 +1,14 @@
 import type { Deviations } from './deviations.js';
-import type { FoundPortfolio } from './proof-task.js';
+import type { Goal } from './goal.js';
 import { Reach } from './reach.js';
-import type { Precision, StepLine, Stretch } from './step-line.js';
+import type { Stretch } from './step-line.js';
 
-/** What an enumeration works on. Found improvements raise the line and go to `found`. */
+/** What an enumeration works on. Wanted portfolios go to the goal, which then wants less. */
 export interface EnumerationTask {
   readonly deviations: Deviations;
   readonly prices: Float64Array;
   readonly stretch: Stretch;
-  readonly line: StepLine;
-  readonly precision: Precision;
-  readonly found: FoundPortfolio[];
+  readonly goal: Goal;
 }
 
 /**
@@ -22,7 +20,7 @@ export interface EnumerationTask {
  *   all together nor for the loss that is left;
  * - rows with a price stay so far unused that this, too, loses more than is left.
  *
- * A portfolio that would improve on the line loses no more than the gap between tangent and line. So once a cap as
+ * A portfolio that the goal wants loses no more than the gap below the tangent. So once a cap as
  * wide as the gap has been run through, nothing in this part and stretch is missing. Depth-first with its own stack:
  * this loop is where a proof spends its time, and a call for each branch would cost more than the branch.
  */
@@ -158,23 +156,20 @@ export class Enumeration {
     }
   }
 
-  /** What is left to find, at most: the gap between the tangent and the line. */
+  /** What is left to find, at most: the gap between the tangent and what is known. */
   private gap(): number {
-    const { line, deviations, stretch, precision } = this.task;
-    return line.widestGap(deviations.losses.tangent, stretch, precision)?.gap ?? -1;
+    const { goal, deviations, stretch } = this.task;
+    return goal.gapBelow(deviations.losses.tangent, stretch)?.gap ?? -1;
   }
 
-  /** Keeps the portfolio at a depth if it breaks nothing and improves the line. */
+  /** Offers the portfolio at a depth if it breaks nothing. */
   private offer(depth: number, wideCount: number, bound: Float64Array): boolean {
-    const { stretch, line, found } = this.task;
+    const { stretch, goal } = this.task;
     const cost = this.cost[depth];
     if (this.brokenCount > 0 || cost > stretch.to) return false;
     const row = depth * wideCount;
     for (let at = 0; at < wideCount; at++) if (this.wide[row + at] > bound[at]) return false;
-    const benefit = this.benefit[depth];
-    if (!line.raise(cost, benefit)) return false;
-    found.push({ cost, benefit, chosen: this.chosenAt(depth) });
-    return true;
+    return goal.offer(cost, this.benefit[depth], () => this.chosenAt(depth));
   }
 
   private chosenAt(depth: number): Int32Array {

@@ -3,15 +3,9 @@ import { Relaxation, type KnownPrices } from '../relaxation/relaxation.js';
 import { branchAtFirst, branchAtOption, branchAtPieces } from './branching.js';
 import { Deviations } from './deviations.js';
 import { Enumeration } from './enumeration.js';
+import type { Goal } from './goal.js';
 import { lossesAt, type Losses } from './losses.js';
-import type { FoundPortfolio } from './proof-task.js';
-import type { Precision, StepLine, Stretch, Tangent } from './step-line.js';
-
-export interface NodeSettings {
-  readonly line: StepLine;
-  readonly found: FoundPortfolio[];
-  readonly precision: Precision;
-}
+import type { Gap, Stretch, Tangent } from './step-line.js';
 
 /** What came of the work on a node: what is still open of it, and the effort in branches of an enumeration. */
 interface Outcome {
@@ -32,15 +26,14 @@ export class OpenNode {
     private readonly triesPieces = true,
   ) {}
 
-  /** The widest gap between the tangent and what is known; below nought if nothing is left to find. */
-  gap({ line, precision }: NodeSettings): number {
-    return line.widestGap(this.tangent, this.part, precision)?.gap ?? -1;
+  /** How far below the tangent something wanted may lie; below nought if nothing is left to find. */
+  gap(goal: Goal): number {
+    return goal.gapBelow(this.tangent, this.part)?.gap ?? -1;
   }
 
-  work(settings: NodeSettings): Outcome {
+  work(goal: Goal): Outcome {
     const { part, tangent } = this;
-    const { line, precision } = settings;
-    const open = line.widestGap(tangent, part, precision);
+    const open = goal.gapBelow(tangent, part);
     if (!open) return closed(0);
     const relaxation = new Relaxation(part, this.known);
     const middle = Math.floor((open.from + open.to) / 2);
@@ -51,25 +44,25 @@ export class OpenNode {
       return { children, effort: 2 * RELAXATION };
     }
     const losses = lossesAt(part, relaxation.prices);
-    const rest = line.widestGap(losses.tangent, open, precision);
+    const rest = goal.gapBelow(losses.tangent, open);
     if (!rest) return closed(RELAXATION);
     const prices = relaxation.prices.slice();
-    const enumeration = this.enumerate(settings, losses, prices, rest);
+    const enumeration = this.enumerate(goal, losses, prices, rest);
     const effort = RELAXATION + enumeration.branches;
     if (enumeration.isThrough) return closed(effort);
-    const left = line.widestGap(losses.tangent, rest, precision);
+    const left = goal.gapBelow(losses.tangent, rest);
     if (!left) return closed(effort);
     return this.split(losses, left, relaxation, effort);
   }
 
   private enumerate(
-    { line, found, precision }: NodeSettings,
+    goal: Goal,
     losses: Losses,
     prices: Float64Array,
-    stretch: Stretch & { gap: number },
+    stretch: Gap,
   ): { isThrough: boolean; branches: number } {
     const deviations = new Deviations(this.part, losses, stretch.gap);
-    const enumeration = new Enumeration({ deviations, prices, stretch, line, precision, found });
+    const enumeration = new Enumeration({ deviations, prices, stretch, goal });
     // short runs first: what they find makes the gap, and with it the long run, smaller
     for (let cap = stretch.gap / 8; cap < stretch.gap; cap *= 2) {
       const left = MOST_BRANCHES - enumeration.branches;
@@ -79,12 +72,7 @@ export class OpenNode {
     return { isThrough, branches: enumeration.branches };
   }
 
-  private split(
-    losses: Losses,
-    stretch: Stretch & { gap: number },
-    relaxation: Relaxation,
-    effort: number,
-  ): Outcome {
+  private split(losses: Losses, stretch: Gap, relaxation: Relaxation, effort: number): Outcome {
     const { part } = this;
     const { tangent } = losses;
     const keep = Uint8Array.from(losses.loss, (loss) => (loss <= stretch.gap ? 1 : 0));
@@ -112,7 +100,7 @@ export class OpenNode {
   /** The branches at the number of pieces, if that lowers the bound by a good part of the gap in both of them. */
   private splitAtPieces(
     { tangent }: Losses,
-    stretch: Stretch & { gap: number },
+    stretch: Gap,
     shares: Float64Array,
     keep: Uint8Array,
     known: KnownPrices,
@@ -138,11 +126,7 @@ export class OpenNode {
   }
 
   /** Whether at an end of the stretch the tangent lies above the relaxation by a good part of the gap. */
-  private strays(
-    tangent: Tangent,
-    { from, to, gap }: Stretch & { gap: number },
-    relaxation: Relaxation,
-  ): boolean {
+  private strays(tangent: Tangent, { from, to, gap }: Gap, relaxation: Relaxation): boolean {
     return [from, to].some((cost) => {
       if (!relaxation.minimise(cost)) return true;
       const there = lossesAt(this.part, relaxation.prices).tangent;

@@ -48,11 +48,7 @@ export class StepLine {
    * costs of a stretch, and where it first and last lies above it. An improvement is more benefit by at least `step`.
    * Undefined if it lies above it nowhere, by `slack` at least.
    */
-  widestGap(
-    { height, slope }: Tangent,
-    { from, to }: Stretch,
-    { step, slack }: Precision,
-  ): (Stretch & { gap: number }) | undefined {
+  widestGap({ height, slope }: Tangent, { from, to }: Stretch, { step, slack }: Precision): Gap | undefined {
     let gap = -slack;
     let first = Infinity;
     let last = -Infinity;
@@ -103,6 +99,11 @@ export interface Tangent {
 export interface Stretch {
   readonly from: number;
   readonly to: number;
+}
+
+/** A stretch in which something may lie below a tangent, and how far below it at most. */
+export interface Gap extends Stretch {
+  readonly gap: number;
 }
 
 export interface Precision {

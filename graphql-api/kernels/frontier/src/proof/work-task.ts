@@ -1,14 +1,9 @@
 import type { Model } from '../model/model.js';
 import { partOf } from '../relaxation/open-part.js';
-import { OpenNode, type NodeSettings } from './open-node.js';
+import { OpenNode } from './open-node.js';
+import { FrontierGoal, type Goal } from './goal.js';
 import { precisionOf } from './precision.js';
-import {
-  nodeOf,
-  type FoundPortfolio,
-  type ProofNode,
-  type ProofTask,
-  type ProofTaskResult,
-} from './proof-task.js';
+import { nodeOf, type ProofNode, type ProofTask, type ProofTaskResult } from './proof-task.js';
 import { StepLine } from './step-line.js';
 import { WidestFirst } from './widest-first.js';
 
@@ -18,33 +13,32 @@ import { WidestFirst } from './widest-first.js';
  */
 export function workTask(model: Model, task: ProofTask): ProofTaskResult {
   const line = new StepLine(task.known);
-  const found: FoundPortfolio[] = [];
-  const settings: NodeSettings = { line, found, precision: precisionOf(model) };
+  const goal = new FrontierGoal(line, precisionOf(model));
   // a gap only shrinks as points are found: the one a node is filed under is an upper bound
   const open = new WidestFirst<OpenNode>();
   for (const node of task.nodes) {
     const part = partOf(model, node.options, rangeOf(node));
-    if (part) file(open, new OpenNode(part, node.tangent), settings);
+    if (part) file(open, new OpenNode(part, node.tangent), goal);
   }
   let effort = 0;
   while (open.size > 0 && effort < task.effort) {
-    const outcome = open.take()!.work(settings);
+    const outcome = open.take()!.work(goal);
     effort += outcome.effort;
-    for (const child of outcome.children) file(open, child, settings);
+    for (const child of outcome.children) file(open, child, goal);
   }
   return {
     id: task.id,
-    found: found.filter(({ cost, benefit }) => line.has(cost, benefit)),
+    found: goal.found.filter(({ cost, benefit }) => line.has(cost, benefit)),
     open: open
       .values()
-      .filter((node) => node.gap(settings) >= 0)
+      .filter((node) => node.gap(goal) >= 0)
       .map(({ part, tangent }) => nodeOf(part, tangent)),
     effort,
   };
 }
 
-function file(open: WidestFirst<OpenNode>, node: OpenNode, settings: NodeSettings): void {
-  const gap = node.gap(settings);
+function file(open: WidestFirst<OpenNode>, node: OpenNode, goal: Goal): void {
+  const gap = node.gap(goal);
   if (gap >= 0) open.add(gap, node);
 }
 

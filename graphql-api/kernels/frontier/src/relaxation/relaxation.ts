@@ -97,7 +97,9 @@ export class Relaxation {
         continue;
       }
       if (this.walk(obstacle)) continue;
-      if (this.fallsForEver()) return false;
+      const isImpossible = this.fallsForEver();
+      this.takeBackBest();
+      if (isImpossible) return false;
       break;
     }
     for (let row = 0; row < this.prices.length; row++) {
@@ -131,6 +133,12 @@ export class Relaxation {
       if (this.worth[option] > this.worth[best]) best = option;
     }
     return best;
+  }
+
+  /** After a walk that led nowhere, and on its way passed changes of the best options. */
+  private takeBackBest(): void {
+    for (let k = 0; k < this.part.classCount; k++)
+      if (this.tiesInClass[k] === 0) this.best[k] = this.bestOf(k);
   }
 
   /** Factors the ties over the free prices, holding what is too much, and puts the prices where the ties meet. */
