@@ -74,8 +74,11 @@ export class FrontierSearch {
   /** Does the next piece of what is done here; false if nothing is until results have been accepted. */
   advance(): boolean {
     const { archive } = this.search;
-    if (archive.evaluations < this.searchUntil) {
-      this.search.step(Math.min(this.searchUntil - archive.evaluations, this.reportEvery, SLICE));
+    const before = archive.evaluations;
+    if (before < this.searchUntil) {
+      this.search.step(Math.min(this.searchUntil - before, this.reportEvery, SLICE));
+      // a step that had nothing to look at has used up its turn all the same
+      if (archive.evaluations === before) archive.evaluations++;
       return true;
     }
     const start = this.starts.pop();

@@ -2,7 +2,7 @@ import { compileModel } from '../model/compile-model.js';
 import { picksOf } from '../model/working-portfolio.js';
 import { totalsOf, type Picks } from '../problem/feasible.js';
 import type { Problem } from '../problem/problem.js';
-import { wholeModel } from '../relaxation/open-part.js';
+import { wholeModel } from '../relaxation/narrow-part.js';
 import { reduceProblem } from '../reduction/reduce-problem.js';
 import type { FrontierPoint } from '../search.js';
 import type { Goal } from './goal.js';

@@ -1,4 +1,5 @@
-import { narrow, type OpenPart } from '../relaxation/open-part.js';
+import { narrow } from '../relaxation/narrow-part.js';
+import type { OpenPart } from '../relaxation/open-part.js';
 import { Relaxation, type KnownPrices } from '../relaxation/relaxation.js';
 import { branchAtFirst, branchAtOption, branchAtPieces } from './branching.js';
 import { Deviations } from './deviations.js';

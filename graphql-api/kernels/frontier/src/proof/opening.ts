@@ -1,5 +1,6 @@
 import type { Model } from '../model/model.js';
-import { narrow, wholeModel, type OpenPart } from '../relaxation/open-part.js';
+import { narrow, wholeModel } from '../relaxation/narrow-part.js';
+import type { OpenPart } from '../relaxation/open-part.js';
 import { Relaxation } from '../relaxation/relaxation.js';
 import { lossesAt } from './losses.js';
 import { nodeOf, type ProofNode } from './proof-task.js';

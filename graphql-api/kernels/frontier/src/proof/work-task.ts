@@ -1,5 +1,5 @@
 import type { Model } from '../model/model.js';
-import { partOf } from '../relaxation/open-part.js';
+import { partOf } from '../relaxation/narrow-part.js';
 import { OpenNode } from './open-node.js';
 import { FrontierGoal, type Goal } from './goal.js';
 import { precisionOf } from './precision.js';

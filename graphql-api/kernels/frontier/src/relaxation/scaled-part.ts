@@ -24,7 +24,7 @@ export class ScaledPart {
     this.termValue = new Float64Array(this.termRow.length);
     const largest = new Float64Array(figures);
     this.layTerms(largest);
-    this.rowScale = largest.map((size) => 1 / Math.max(size, Number.MIN_VALUE));
+    this.rowScale = largest.map((size) => (size > 0 ? 1 / size : 1));
     for (let term = 0; term < this.termRow.length; term++) {
       this.termValue[term] *= this.rowScale[this.termRow[term]];
     }
