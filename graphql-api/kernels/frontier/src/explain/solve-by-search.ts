@@ -6,7 +6,7 @@ import type { Solve } from './solve.js';
  * counts its seconds. Explanations ask small questions, so that a small budget answers most of them.
  */
 export function solveBySearch(
-  settings: SearchSettings = { evaluations: 200_000 },
+  settings: SearchSettings = SMALL_BUDGET,
   goesOn: (progress: SearchProgress) => boolean = () => true,
 ): Solve {
   return (problem) => {
@@ -16,3 +16,6 @@ export function solveBySearch(
     return step.value;
   };
 }
+
+/** Seconds at most, even where the proof does not come to an end. */
+const SMALL_BUDGET: SearchSettings = { evaluations: 50_000, effort: 10_000_000 };
