@@ -52,11 +52,15 @@ function worthOf(model: Model, option: number, price: number, limitPrice: Float6
 
 /** A whole limit is held worth as much as the whole ceiling, times the share. */
 export function limitPrices(model: Model, { price, limitShare }: StartWeights): Float64Array {
-  const budget =
-    model.ceiling < Infinity ? model.ceiling : model.optionCost.reduce((sum, cost) => sum + cost, 0);
+  const budget = budgetOf(model);
   return Float64Array.from(model.rows, ({ kind }, row) =>
     kind === 'limit most' ? limitShare * price * budget * model.rowWeight[row] : 0,
   );
+}
+
+/** The ceiling, or without one the cost of all options together. */
+export function budgetOf({ ceiling, optionCost }: Model): number {
+  return ceiling < Infinity ? ceiling : optionCost.reduce((sum, cost) => sum + cost, 0);
 }
 
 function averageOption({ optionBenefit, optionCost }: Model): { benefit: number; cost: number } {

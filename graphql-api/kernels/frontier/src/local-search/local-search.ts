@@ -1,3 +1,4 @@
+import { Annealing } from './annealing.js';
 import { CombinationScan, leastLoss } from './combination-scan.js';
 import { chooseGreedily, startWeights, type StartWeights } from './construct.js';
 import { describeViolation, violationsOf } from '../problem/feasible.js';
@@ -6,17 +7,19 @@ import { walkUp } from './greedy-walk.js';
 import { Links } from '../model/links.js';
 import type { Model } from '../model/model.js';
 import { MoveList } from './move-list.js';
+import { PathRelinking } from './path-relinking.js';
 import { Random } from './random.js';
 import { SearchArchive } from '../archive/search-archive.js';
+import { Shaking } from './shaking.js';
 import { Settler } from './settler.js';
 import { picksOf, WorkingPortfolio } from '../model/working-portfolio.js';
 
 /**
  * Local search over a front with neighbourhoods of growing size (variable neighbourhood search; Mladenović and Hansen
- * 1997, over an archive as in Pareto local search; both from memory). First greedy starts; then all portfolios one
- * change away from each member and all two changes away; then, by turns of as many evaluations each, combinations of
- * three changes, and shakes that grow until one finds something new. Whatever is new is explored from the smallest
- * neighbourhood on, the member with the widest gap to its neighbours first.
+ * 1997, over an archive as in Pareto local search; both from memory). First greedy walks for a rough front at once; then
+ * by turns: exploring, greedy starts, path relinking, shakes and annealing. To explore is to look at all portfolios one
+ * change away from a member, then at combinations of two changes, then of three; whatever is new is explored from the
+ * smallest neighbourhood on, the member with the widest gap to its neighbours first.
  */
 export class LocalSearch {
   readonly archive: SearchArchive;
@@ -36,9 +39,22 @@ export class LocalSearch {
   private readonly walks = [3, 0, 1, 0.3];
   private readonly starts: StartWeights[];
   private scanUnderWay = false;
-  /** Evaluations by which the shakes are behind the wide scans. */
-  private shakesDue = 0;
-  private shakeSize = LEAST_SHAKE;
+  private readonly shaking: Shaking;
+  private readonly annealing: Annealing;
+  private readonly relinking: PathRelinking;
+  private readonly exploring: Turn = {
+    search: (evaluations) => this.explore(evaluations),
+    share: 3,
+    spent: 0,
+  };
+  /** Each gets its share of the evaluations, as long as it has something to do; those of a scan cost least by far. */
+  private readonly turns: readonly Turn[] = [
+    this.exploring,
+    { search: () => this.start(), share: 1, spent: 0 },
+    { search: () => this.relinking.linkNext(), share: 1, spent: 0 },
+    { search: () => this.shake(), share: 1, spent: 0 },
+    { search: () => this.anneal(), share: 1, spent: 0 },
+  ];
   /** The least broken portfolio, kept until there is a feasible one. */
   private nearest: { excess: number; chosen: Int32Array } | undefined;
 
@@ -57,6 +73,9 @@ export class LocalSearch {
     this.scannedMoves = new MoveList(this.scanned, this.links);
     this.scan = new CombinationScan(this.scanned, this.scannedMoves, this.archive);
     this.random = new Random(seed);
+    this.shaking = new Shaking(this.portfolio, this.links, this.random);
+    this.annealing = new Annealing(this.portfolio, this.links, this.archive, this.random);
+    this.relinking = new PathRelinking(this.portfolio, this.archive);
     this.loaded = new Int32Array(model.classCount);
     this.starts = startWeights(model).reverse();
     this.findCheapest();
@@ -64,16 +83,16 @@ export class LocalSearch {
 
   /** Does the next piece of work, of about so many evaluations where it can be divided. */
   step(evaluations: number): void {
-    this.archive.tendTable();
-    if (this.scanUnderWay) {
-      this.continueScan(evaluations);
-      return;
-    }
-    if (this.start()) return;
-    const member = this.order.next();
-    const isWide = member >= 0 && this.levelOf(member) === WIDEST_LEVEL;
-    if (member < 0 || (isWide && this.shakesDue > 0)) this.shake();
-    else this.explore(member);
+    const { archive } = this;
+    archive.tendTable();
+    if (this.walk()) return;
+    // a scan is gone on with before anything else, so that in what pieces it is made changes nothing
+    const turn = this.scanUnderWay ? this.exploring : this.nextTurn();
+    const before = archive.evaluations;
+    if (!turn.search(evaluations)) turn.spent = Math.max(...this.turns.map(({ spent }) => spent));
+    // what changed and mended nothing has still used up its turn
+    if (turn !== this.exploring && archive.evaluations === before) archive.evaluations++;
+    turn.spent += (archive.evaluations - before) / turn.share;
   }
 
   /** What the least broken portfolio met breaks, if no feasible one was found. */
@@ -97,43 +116,57 @@ export class LocalSearch {
     else this.noteNearest();
   }
 
-  /** Makes the next of the starts: first the walks, which give a rough front at once. False when all are made. */
-  private start(): boolean {
+  private nextTurn(): Turn {
+    return this.turns.reduce((least, other) => (other.spent < least.spent ? other : least));
+  }
+
+  /** Makes the next of the walks, which give a rough front at once; false when all are made or none is possible. */
+  private walk(): boolean {
     const { portfolio, archive } = this;
     const limitShare = archive.front.size > 0 ? this.walks.pop() : undefined;
-    if (limitShare !== undefined) {
-      portfolio.load(archive.front.choicesAt(0, this.loaded));
-      walkUp(portfolio, this.links, archive, limitShare);
-      return true;
-    }
+    if (limitShare === undefined) return false;
+    portfolio.load(archive.front.choicesAt(0, this.loaded));
+    walkUp(portfolio, this.links, archive, limitShare);
+    return true;
+  }
+
+  /** Makes the next of the greedy starts. */
+  private start(): boolean {
     const weights = this.starts.pop();
     if (weights === undefined) return false;
-    chooseGreedily(portfolio, weights);
+    chooseGreedily(this.portfolio, weights);
     this.settle(weights.price);
     return true;
   }
 
-  private continueScan(evaluations: number): void {
-    const before = this.archive.evaluations;
-    this.scanUnderWay = !this.scan.advance(evaluations);
-    if (this.scan.size === WIDEST.size) this.shakesDue += this.archive.evaluations - before;
-  }
-
-  private explore(place: number): void {
+  /** Explores the member that is next in order a level further. */
+  private explore(evaluations: number): boolean {
+    if (this.scanUnderWay) {
+      this.scanUnderWay = !this.scan.advance(evaluations);
+      return true;
+    }
+    const place = this.order.next();
+    if (place < 0) return false;
     const { front } = this.archive;
     const level = this.levelOf(place);
-    const price = this.priceAt(place);
     this.archive.setExplored(front.slotAt(place), level + 1);
-    if (level === 0) {
-      this.portfolio.load(front.choicesAt(place, this.loaded));
-      this.moves.refresh();
-      this.settler.scanSingles(price, 1);
-      return;
-    }
-    const { size, most } = COMBINATIONS[level - 1];
-    this.scanned.load(front.choicesAt(place, this.loaded));
+    front.choicesAt(place, this.loaded);
+    if (level === 0) this.exploreSingles(this.priceAt(place));
+    else this.beginScan(COMBINATIONS[level - 1], this.priceAt(place));
+    return true;
+  }
+
+  private exploreSingles(price: number): void {
+    this.portfolio.load(this.loaded);
+    this.moves.refresh();
+    this.settler.scanSingles(price, 1);
+  }
+
+  private beginScan({ size, most }: { size: number; most: number }, price: number): void {
+    this.scanned.load(this.loaded);
     this.scannedMoves.refresh();
-    this.scan.begin(size, leastLoss(this.scannedMoves, price, most));
+    const isLong = this.scannedMoves.count > LONG_LIST;
+    this.scan.begin(size, leastLoss(this.scannedMoves, price, isLong ? Math.min(most, CORE) : most));
     this.scanUnderWay = true;
   }
 
@@ -142,29 +175,33 @@ export class LocalSearch {
   }
 
   /** Changes a random member at random in several places and settles the outcome. */
-  private shake(): void {
-    const { archive, random, portfolio } = this;
-    const before = { evaluations: archive.evaluations, improvements: archive.improvements };
-    const place = archive.front.size > 0 ? random.below(archive.front.size) : -1;
-    if (place >= 0) portfolio.load(archive.front.choicesAt(place, this.loaded));
-    else if (this.nearest) portfolio.load(this.nearest.chosen);
-    for (let change = 0; change < this.shakeSize; change++) this.changeAtRandom();
-    this.settle(place >= 0 ? this.priceAt(place) : 0);
-    const foundNew = archive.improvements > before.improvements;
-    this.shakeSize = foundNew || this.shakeSize === MOST_SHAKE ? LEAST_SHAKE : this.shakeSize + 1;
-    this.shakesDue -= archive.evaluations - before.evaluations;
-    // a shake that changed and mended nothing has still used up its turn
-    archive.evaluations++;
+  private shake(): boolean {
+    const { archive } = this;
+    const { improvements } = archive;
+    const price = this.loadAny();
+    this.shaking.shake();
+    this.settle(price);
+    this.shaking.learn(archive.improvements > improvements);
+    return true;
   }
 
-  private changeAtRandom(): void {
-    const { model, random, portfolio } = this;
-    if (model.classCount === 0) return;
-    const k = random.below(model.classCount);
-    const option = model.optionStart[k] + random.below(model.optionStart[k + 1] - model.optionStart[k]);
-    if (option === portfolio.chosen[k]) return;
-    const size = this.links.packageOf(portfolio, option, random.below(this.links.variants(option)));
-    for (let at = 0; at < size; at++) portfolio.choose(this.links.together[at]);
+  private anneal(): boolean {
+    const price = this.loadAny();
+    this.annealing.walk(price);
+    this.settle(price);
+    return true;
+  }
+
+  /** Loads a random member, or the least broken portfolio while there is none. Returns the price around it. */
+  private loadAny(): number {
+    const { front } = this.archive;
+    if (front.size === 0) {
+      if (this.nearest) this.portfolio.load(this.nearest.chosen);
+      return 0;
+    }
+    const place = this.random.below(front.size);
+    this.portfolio.load(front.choicesAt(place, this.loaded));
+    return this.priceAt(place);
   }
 
   /** Repairs the portfolio and improves it, both at a price for cost. */
@@ -195,15 +232,22 @@ export class LocalSearch {
   }
 }
 
+/** A way to search (false if it found nothing to do), and the evaluations it has spent, divided by its share. */
+interface Turn {
+  readonly search: (evaluations: number) => boolean;
+  readonly share: number;
+  spent: number;
+}
+
 /** A price at which any cost outweighs any benefit. */
 const DEAR = 1e9;
-const LEAST_SHAKE = 3;
-const MOST_SHAKE = 12;
 
-/**
- * What follows the single changes of a member: all combinations of so many of the moves that lose least. The widest
- * takes turns with the shakes.
- */
-const WIDEST = { size: 3, most: 50 };
-const COMBINATIONS = [{ size: 2, most: 200 }, WIDEST];
-const WIDEST_LEVEL = COMBINATIONS.length;
+/** In long lists of moves only a core of those that lose least is combined, so that a scan stays short at any size. */
+const LONG_LIST = 200;
+const CORE = 100;
+
+/** What follows the single changes of a member: all combinations of so many of the moves that lose least. */
+const COMBINATIONS = [
+  { size: 2, most: 200 },
+  { size: 3, most: 50 },
+];
