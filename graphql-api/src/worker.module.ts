@@ -11,6 +11,8 @@ import { NotificationsModule } from './notifications/notifications.module.js';
 import { SendLetterJob } from './notifications/send-letter.job.js';
 import { TenancyModule } from './tenancy/tenancy.module.js';
 
+const env = readWorkerEnv();
+
 /** The same features without the API. */
 @Module({
   imports: [
@@ -21,8 +23,8 @@ import { TenancyModule } from './tenancy/tenancy.module.js';
     DiscoveryModule,
     MailModule,
     NotificationsModule,
-    FrontierWorkerModule,
+    FrontierWorkerModule.onThreads(env.searchThreads),
   ],
-  providers: [{ provide: WORKER_ENV, useFactory: () => readWorkerEnv() }, JobRunnerService, SendLetterJob],
+  providers: [{ provide: WORKER_ENV, useValue: env }, JobRunnerService, SendLetterJob],
 })
 export class WorkerModule {}

@@ -1,10 +1,9 @@
 import { TestApp } from './app.js';
 import { aDemoOrganisation, asOwner, inOrganisation, type DemoOrganisation } from './demo-organisation.js';
 import { extendQuote } from './extend-quote.js';
-import { codesOf, ended, readRun, runOnce, search, startSearch, underWay, type RunView } from './runs.js';
+import { codesOf, search, startSearch, type RunView } from './runs.js';
 import { startWorker, stopWorker } from './worker-process.js';
 
-const STOP = 'mutation ($id: ID!) { stopSearch(runId: $id) { id stopRequested } }';
 const CHART = `query ($id: ID!) {
   run(id: $id) { lookedAt { costs benefits } onceKept { costs benefits } round { id } startedBy { name } ceiling { amount } }
 }`;
@@ -35,21 +34,21 @@ const best = (run: RunView) => run.points[run.points.length - 1];
 
 describe('the search over the first demo organisation', () => {
   let round: Awaited<ReturnType<typeof aRound>>;
-  let undisturbed: RunView;
+  let found: RunView;
 
   beforeAll(async () => {
     round = await aRound('T1');
-    undisturbed = await withWorker(() => search(round.coordinator, round.roundId));
+    found = await withWorker(() => search(round.coordinator, round.roundId));
   }, SEARCH_SECONDS);
 
   it('reaches the best portfolio known, under all its limits', () => {
-    expect(undisturbed).toMatchObject({ state: 'FINISHED', number: 1, seed: 1, failure: null, notes: [] });
-    expect(best(undisturbed)).toMatchObject({ benefit: '818.7213', cost: { amount: '2300556.00' } });
-    expect(codesOf(undisturbed, best(undisturbed))).toHaveLength(29);
+    expect(found).toMatchObject({ state: 'FINISHED', number: 1, seed: 1, failure: null, notes: [] });
+    expect(best(found)).toMatchObject({ benefit: '818.7213', cost: { amount: '2300556.00' } });
+    expect(codesOf(found, best(found))).toHaveLength(29);
   });
 
   it('adds up: every point is the sum of what it takes, and both figures rise', () => {
-    const { points, items } = undisturbed;
+    const { points, items } = found;
     const rise = points.slice(1).every((point, i) => {
       const before = points[i];
       return (
@@ -70,18 +69,27 @@ describe('the search over the first demo organisation', () => {
     }
   });
 
-  it('says that it has proven nothing', () => {
-    expect(undisturbed.certificate).toEqual({ status: 'UNPROVEN', provenStretches: [], gapPercent: null });
-    expect(undisturbed.progress).toMatchObject({
+  it('says that it has proven all of it', () => {
+    const { certificate, points } = found;
+    expect(points).toHaveLength(853);
+    expect(certificate).toMatchObject({
+      status: 'COMPLETE',
+      provenStretches: [[0, 2_304_000]],
+      gapPercent: 0,
+      provenShare: 1,
+    });
+    expect(certificate.bound.costs).toEqual(points.map(({ cost }) => Number(cost.amount)));
+    expect(points.every(({ atMostMore }) => atMostMore === '0.0000')).toBe(true);
+    expect(found.progress).toMatchObject({
       bestBenefit: '818.7213',
       share: 1,
-      kept: undisturbed.points.length,
+      kept: found.points.length,
     });
-    expect(undisturbed.kneeIndex).toBeGreaterThan(0);
+    expect(found.kneeIndex).toBeGreaterThan(0);
   });
 
   it('keeps a sample of what it looked at, and of what it once kept', async () => {
-    const { run } = await round.coordinator.get(CHART, { id: undisturbed.id });
+    const { run } = await round.coordinator.get(CHART, { id: found.id });
     expect(run).toMatchObject({
       round: { id: round.roundId },
       startedBy: { name: 'Hanne Vos' },
@@ -94,61 +102,16 @@ describe('the search over the first demo organisation', () => {
       expect(Math.max(...costs)).toBeLessThanOrEqual(2_304_000);
     }
   });
+});
 
+describe('the same on life-cycle cost', () => {
   it(
-    'loses nothing when its worker is killed, and the next one told to end: others take over and find the same',
+    'is proven complete too',
     async () => {
-      const killed = await startWorker();
-      const { id } = await startSearch(round.coordinator, round.roundId);
-      const before = await runOnce(round.coordinator, id, underWay);
-      await stopWorker(killed, 'SIGKILL');
-      const killedAt = Date.now();
-
-      const leaving = await startWorker();
-      expect(await attemptsOnce(round.organisation, id, 2)).toBeLessThanOrEqual(killedAt + 45_000);
-      const { progress } = await readRun(round.coordinator, id);
-      expect(progress?.evaluations).toBeGreaterThanOrEqual(before.progress?.evaluations ?? 0);
-      await stopWorker(leaving);
-      const [{ free }] = await inRound(
-        round,
-        'select lease_until < now() as free from metewand.run where id = $1',
-        [id],
-      );
-      expect(free).toBe(true);
-
-      const run = await withWorker(() => runOnce(round.coordinator, id, ended));
-      expect(run.state).toBe('FINISHED');
-      expect(withoutIdentity(run)).toEqual(withoutIdentity(undisturbed));
-      expect(await attemptsOnce(round.organisation, id, 3)).toBeGreaterThan(killedAt);
-    },
-    SEARCH_SECONDS,
-  );
-
-  it(
-    'can be stopped, and what it has found is kept',
-    async () => {
-      await withWorker(async () => {
-        const { id } = await startSearch(round.coordinator, round.roundId);
-        await runOnce(round.coordinator, id, underWay);
-        expect(await startSearch(round.coordinator, round.roundId)).toEqual({
-          __typename: 'SearchAlreadyRunning',
-          message: 'Run 3 is still under way. Wait for its end, or stop and keep it.',
-        });
-        expect((await round.coordinator.get(STOP, { id })).stopSearch).toEqual({ id, stopRequested: true });
-        const run = await runOnce(round.coordinator, id, ended);
-        expect(run.state).toBe('STOPPED');
-        expect(run.points.length).toBeGreaterThan(0);
-        expect(run.progress?.share).toBeLessThan(1);
-      });
-      const { auditFeed } = await round.coordinator.get(
-        'query ($id: ID!) { auditFeed(roundId: $id, first: 3) { items { sentence by { name } } } }',
-        { id: round.roundId },
-      );
-      expect(auditFeed.items).toEqual([
-        { sentence: 'Run 3 ended: stopped and kept', by: null },
-        { sentence: 'Run 3 asked to stop', by: { name: 'Hanne Vos' } },
-        { sentence: 'Run 3 started', by: { name: 'Hanne Vos' } },
-      ]);
+      const { coordinator, roundId } = await aRound('T1');
+      const run = await withWorker(() => search(coordinator, roundId, { costAxis: 'LIFE_CYCLE' }));
+      expect(run.certificate).toMatchObject({ status: 'COMPLETE', gapPercent: 0, provenShare: 1 });
+      expect(run.points).toHaveLength(788);
     },
     SEARCH_SECONDS,
   );
@@ -161,6 +124,8 @@ describe('the search over the second demo organisation', () => {
       const { coordinator, organisation, roundId } = await aRound('T2');
       await withWorker(async () => {
         const run = await search(coordinator, roundId);
+        expect(run.certificate).toMatchObject({ status: 'COMPLETE', gapPercent: 0, provenShare: 1 });
+        expect(run.points).toHaveLength(48);
         expect(best(run)).toMatchObject({ benefit: '308.9540', cost: { amount: '360800.40' } });
         expect(codesOf(run, best(run)).join(' ')).toBe('D-02 D-03 D-06 D-09 D-11 D-13 D-14 D-15 D-19');
         expect(run.leftOut).toEqual([
@@ -256,35 +221,6 @@ describe('a search is not started', () => {
   });
 });
 
-function inRound({ organisation }: { organisation: DemoOrganisation }, sql: string, parameters: unknown[]) {
-  return asOwner((client) => inOrganisation(client, organisation.id, sql, parameters));
-}
-
 function change({ id }: DemoOrganisation, sql: string) {
   return asOwner((client) => inOrganisation(client, id, sql));
-}
-
-/** Resolves, with the time, once so many workers have held the run. */
-async function attemptsOnce(
-  { id: organisationId }: DemoOrganisation,
-  runId: string,
-  attempts: number,
-): Promise<number> {
-  return asOwner(async (client) => {
-    for (;;) {
-      const [{ attempt }] = await inOrganisation(
-        client,
-        organisationId,
-        'select attempt from metewand.run where id = $1',
-        [runId],
-      );
-      if (Number(attempt) >= attempts) return Date.now();
-      await new Promise((resolve) => setTimeout(resolve, 250));
-    }
-  });
-}
-
-/** What two runs over the same figures and seed must have in common: all but their number. */
-function withoutIdentity({ id: _id, number: _number, ...run }: RunView) {
-  return run;
 }

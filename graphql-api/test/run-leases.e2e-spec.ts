@@ -43,8 +43,8 @@ async function aRun(problem: object = PROBLEM): Promise<string> {
   const items = { currency: 'GBP', spendableMinor: 100, items: [], leftOut: [] };
   number += 1;
   const [{ id }] = await change(
-    `insert into metewand.run (round_id, number, cost_axis, seed, evaluations, problem, items, fingerprint, started_by)
-     select $1, $2, 'CAPITAL', 1, 1000, $3, $4, 'sha256:none', id from metewand.membership where email = $5 returning id`,
+    `insert into metewand.run (round_id, number, cost_axis, seed, evaluations, effort, problem, items, fingerprint, started_by)
+     select $1, $2, 'CAPITAL', 1, 1000, 1000, $3, $4, 'sha256:none', id from metewand.membership where email = $5 returning id`,
     [organisation.roundId, number, problem, items, organisation.email('PURCHASING_COORDINATOR')],
   );
   return id as string;
@@ -57,7 +57,6 @@ const fallSilent = (id: string) =>
 
 const progressOf = (evaluations: number): RunProgressRow => ({
   evaluations,
-  of: 1_000,
   kept: 1,
   points: [{ benefit: evaluations, cost: 10, picks: [] }],
 });
@@ -65,7 +64,6 @@ const resultOf = (evaluations: number): RunResultRow => ({
   status: 'UNPROVEN',
   stopped: false,
   evaluations,
-  of: 1_000,
   points: [{ benefit: evaluations, cost: 10, picks: [] }],
   kneeIndex: null,
   lookedAt: [],

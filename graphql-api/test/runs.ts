@@ -5,6 +5,7 @@ export interface FoundPoint {
   benefit: string;
   cost: { amount: string };
   capital: { amount: string };
+  atMostMore: string | null;
   picks: number[];
 }
 
@@ -24,7 +25,13 @@ export interface RunView {
     bestBenefit: string;
     share: number;
   } | null;
-  certificate: { status: string; provenStretches: number[][]; gapPercent: number | null };
+  certificate: {
+    status: string;
+    provenStretches: number[][];
+    bound: { costs: number[]; benefits: number[] };
+    gapPercent: number | null;
+    provenShare: number;
+  };
   items: { code: string; mandatory: boolean; benefit: string; capital: { amount: string } }[];
   leftOut: { code: string; reason: string; mandatory: boolean }[];
   points: FoundPoint[];
@@ -44,10 +51,10 @@ const RUN = `query ($id: ID!) {
   run(id: $id) {
     id number state seed fingerprint failure notes kneeIndex
     progress { evaluations kept lookedAt bestBenefit share }
-    certificate { status provenStretches gapPercent }
+    certificate { status provenStretches bound { costs benefits } gapPercent provenShare }
     items { code mandatory benefit capital { amount } }
     leftOut { code reason mandatory }
-    points { benefit cost { amount } capital { amount } picks }
+    points { benefit cost { amount } capital { amount } atMostMore picks }
   }
 }`;
 

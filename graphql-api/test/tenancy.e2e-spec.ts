@@ -151,8 +151,8 @@ async function objectsOf(organisation: DemoOrganisation) {
       [rows.candidate[0].id, membership.id],
     );
     const run = await insert(
-      `insert into metewand.run (round_id, number, cost_axis, state, seed, evaluations, problem, items, fingerprint, result, started_by)
-       values ($1, 1, 'CAPITAL', 'FINISHED', 1, 1, '{}', '[]', 'none', '{}', $2)`,
+      `insert into metewand.run (round_id, number, cost_axis, state, seed, evaluations, effort, problem, items, fingerprint, result, started_by)
+       values ($1, 1, 'CAPITAL', 'FINISHED', 1, 1, 1, '{}', '[]', 'none', '{}', $2)`,
       [roundId, membership.id],
     );
     const selection = await insert(

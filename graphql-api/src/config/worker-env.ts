@@ -1,9 +1,12 @@
+import { availableParallelism } from 'node:os';
 import { required } from './env.js';
 
 /** What the worker process needs beside the rest. */
 export interface WorkerEnv {
   databaseWorkerUrl: string;
   concurrency: number;
+  /** Threads that work on one run. */
+  searchThreads: number;
 }
 
 export const WORKER_ENV = Symbol('WORKER_ENV');
@@ -12,5 +15,6 @@ export function readWorkerEnv(source: NodeJS.ProcessEnv = process.env): WorkerEn
   return {
     databaseWorkerUrl: required(source, 'DATABASE_WORKER_URL'),
     concurrency: Number(source.WORKER_CONCURRENCY ?? 3),
+    searchThreads: Number(source.SEARCH_THREADS ?? Math.min(4, availableParallelism())),
   };
 }

@@ -13,6 +13,7 @@ import { Letters1764600012000 } from './migrations/12-letters.js';
 import { Jobs1764600013000 } from './migrations/13-jobs.js';
 import { PatientJobs1764600014000 } from './migrations/14-patient-jobs.js';
 import { RunEffort1764600015000 } from './migrations/15-run-effort.js';
+import { RunTasks1764600016000 } from './migrations/16-run-tasks.js';
 
 /** In the order in which they are run. */
 export const migrations = [
@@ -31,4 +32,5 @@ export const migrations = [
   Jobs1764600013000,
   PatientJobs1764600014000,
   RunEffort1764600015000,
+  RunTasks1764600016000,
 ];

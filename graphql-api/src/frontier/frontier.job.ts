@@ -1,10 +1,13 @@
 import { AsyncResource } from 'node:async_hooks';
-import { Injectable, Logger, type BeforeApplicationShutdown } from '@nestjs/common';
+import { Inject, Injectable, Logger, type BeforeApplicationShutdown } from '@nestjs/common';
 import { JobHandler, type HandlesJob } from '../jobs/job-handler.decorator.js';
+import { PassedOver } from '../jobs/passed-over.js';
 import { LeaseKeeper } from './lease-keeper.js';
 import { RunLeasesService, type HeldRun } from './run-leases.service.js';
 import type { RunResultRow } from './run-result.js';
+import { RunTasksService } from './run-tasks.service.js';
 import { SearchHost } from './search-host.js';
+import { SEARCH_THREADS } from './search-settings.js';
 
 /**
  * Searches a run. The same run may be delivered twice, or its worker may die: the lease lets one worker at a time
@@ -17,12 +20,17 @@ export class FrontierJob implements HandlesJob<'frontier.search'>, BeforeApplica
   private readonly handBacks = new Set<() => Promise<void>>();
   private closing = false;
 
-  constructor(private readonly leases: RunLeasesService) {}
+  constructor(
+    private readonly leases: RunLeasesService,
+    private readonly tasks: RunTasksService,
+    private readonly passedOver: PassedOver,
+    @Inject(SEARCH_THREADS) private readonly threads: number,
+  ) {}
 
   async run({ runId }: { runId: string }) {
     if (this.closing) return;
     const run = await this.leases.claim(runId);
-    if (run) await this.search(run);
+    if (run) await this.passedOver.during(run.id, () => this.search(run));
   }
 
   /** Runs under way go back, so that another worker need not wait for their leases to run out. */
@@ -33,7 +41,14 @@ export class FrontierJob implements HandlesJob<'frontier.search'>, BeforeApplica
 
   private async search(run: HeldRun) {
     const { problem, seed, evaluations, effort, seenEvaluations } = run;
-    const search = new SearchHost({ problem, seed, evaluations, effort, leastEvaluations: seenEvaluations });
+    const search = new SearchHost({
+      problem,
+      seed,
+      evaluations,
+      effort,
+      threads: this.threads,
+      leastEvaluations: seenEvaluations,
+    });
     const keeper = new LeaseKeeper(this.leases, run, search);
     let abandoned = false;
     const handBack = AsyncResource.bind(async () => {
@@ -43,7 +58,7 @@ export class FrontierJob implements HandlesJob<'frontier.search'>, BeforeApplica
     });
     this.handBacks.add(handBack);
     try {
-      const outcome = await this.outcomeOf(search, keeper);
+      const outcome = await this.outcomeOf(search, run, keeper);
       await keeper.end();
       if (abandoned || keeper.lost) return;
       if (outcome) await this.leases.finish(run, outcome);
@@ -57,9 +72,16 @@ export class FrontierJob implements HandlesJob<'frontier.search'>, BeforeApplica
     }
   }
 
-  private async outcomeOf(search: SearchHost, keeper: LeaseKeeper): Promise<RunResultRow | undefined> {
+  private async outcomeOf(
+    search: SearchHost,
+    run: HeldRun,
+    keeper: LeaseKeeper,
+  ): Promise<RunResultRow | undefined> {
     try {
-      return await search.result((progress) => keeper.report(progress));
+      return await search.result({
+        onProgress: (progress) => keeper.report(progress),
+        exchange: (request) => this.tasks.exchange(run, request),
+      });
     } catch (error) {
       this.log.error(error instanceof Error ? (error.stack ?? error.message) : String(error));
       return undefined;

@@ -94,6 +94,7 @@ export class RunLeasesService {
       { ...outcome, finishedAt: () => 'now()' },
     );
     if (!affected) return;
+    await em.query('delete from run_task where run_id = $1', [id]);
     const { roundId, number } = await em.findOneByOrFail(Run, { id });
     const data = { number, outcome: WORDS[outcome.state], detail: outcome.failure };
     await this.audit.record(em, 'run.ended', { roundId, objectId: id, data });

@@ -1,4 +1,5 @@
 import type { Problem } from '@metewand/frontier';
+import type { ExchangeAnswer, ExchangeRequest } from './threads/task-exchange.js';
 
 /** The JSON that a run's row keeps. Money in minor units, benefit in ten-thousandths of a point. */
 
@@ -88,6 +89,7 @@ export interface SearchOrder {
   seed: number;
   evaluations: number;
   effort: number;
+  threads: number;
   /** A stop counts only from here on: somebody has seen a front this far already. */
   leastEvaluations: number;
   /** One integer, 1 to stop. */
@@ -96,4 +98,12 @@ export interface SearchOrder {
 
 /** What the thread of a search says. */
 export type SearchMessage =
-  { kind: 'progress'; progress: RunProgressRow } | { kind: 'result'; result: RunResultRow };
+  | { kind: 'progress'; progress: RunProgressRow }
+  | { kind: 'exchange'; number: number; request: ExchangeRequest }
+  | { kind: 'result'; result: RunResultRow };
+
+/** What it hears: the answer to an exchange, empty where there was none. */
+export interface ExchangeReply {
+  number: number;
+  answer?: ExchangeAnswer;
+}

@@ -1,7 +1,20 @@
 import { AsyncResource } from 'node:async_hooks';
 import { once } from 'node:events';
 import { Worker } from 'node:worker_threads';
-import type { RunProgressRow, RunResultRow, SearchMessage, SearchOrder } from './run-result.js';
+import type {
+  ExchangeReply,
+  RunProgressRow,
+  RunResultRow,
+  SearchMessage,
+  SearchOrder,
+} from './run-result.js';
+import type { ExchangeRequest, TaskExchange } from './threads/task-exchange.js';
+
+export interface SearchListener {
+  /** As it comes; the search does not wait for it. */
+  onProgress(progress: RunProgressRow): void;
+  exchange: TaskExchange['exchange'];
+}
 
 /** A search in a thread of its own, so that the process goes on answering its database and its signals. */
 export class SearchHost {
@@ -14,16 +27,17 @@ export class SearchHost {
   }
 
   /**
-   * Resolves with the result, or with nothing once the thread was abandoned. Rejects when the thread breaks. Progress
-   * is handed on as it comes, in the caller's context; the search does not wait for it.
+   * Resolves with the result, or with nothing once the thread was abandoned. Rejects when the thread breaks. The
+   * listener is called in the caller's context.
    */
-  async result(onProgress: (progress: RunProgressRow) => void): Promise<RunResultRow | undefined> {
+  async result(listener: SearchListener): Promise<RunResultRow | undefined> {
     let result: RunResultRow | undefined;
-    const inContext = AsyncResource.bind(onProgress);
-    this.thread.on('message', (message: SearchMessage) => {
+    const hear = AsyncResource.bind((message: SearchMessage) => {
       if (message.kind === 'result') result = message.result;
-      else inContext(message.progress);
+      else if (message.kind === 'progress') listener.onProgress(message.progress);
+      else void this.answer(message.number, message.request, listener);
     });
+    this.thread.on('message', hear);
     await once(this.thread, 'exit');
     return result;
   }
@@ -36,5 +50,12 @@ export class SearchHost {
   /** Ends the thread at once; its work is lost here and done again elsewhere. */
   async abandon(): Promise<void> {
     await this.thread.terminate();
+  }
+
+  /** Without an answer the search goes on alone. */
+  private async answer(number: number, request: ExchangeRequest, { exchange }: SearchListener) {
+    const answer = await exchange(request).catch(() => undefined);
+    const reply: ExchangeReply = { number, answer };
+    this.thread.postMessage(reply);
   }
 }

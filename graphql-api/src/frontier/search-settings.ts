@@ -17,5 +17,12 @@ export const LEASE_SECONDS = 30;
 export const HEARTBEAT_MS = 10_000;
 export const SWEEP_MS = 10_000;
 
+/** The same for a task of a run that several workers share. */
+export const TASK_LEASE_SECONDS = 15;
+export const TASK_HEARTBEAT_MS = 4_000;
+
+/** For injection: how many threads of this process work on a run. */
+export const SEARCH_THREADS = Symbol('SEARCH_THREADS');
+
 /** A run that loses its worker this often is the cause itself. */
 export const MOST_ATTEMPTS = 5;

@@ -11,6 +11,7 @@ import { WORKER_ENV, type WorkerEnv } from '../config/worker-env.js';
 import { runInScope } from '../tenancy/request-context.js';
 import { JobHandler, type HandlesJob } from './job-handler.decorator.js';
 import type { JobTask } from './jobs.service.js';
+import { PassedOver } from './passed-over.js';
 
 interface Envelope {
   organisationId: string;
@@ -25,6 +26,7 @@ export class JobRunnerService implements OnApplicationBootstrap, OnApplicationSh
 
   constructor(
     private readonly discovery: DiscoveryService,
+    private readonly passedOver: PassedOver,
     @Inject(WORKER_ENV) private readonly env: WorkerEnv,
   ) {}
 
@@ -33,6 +35,7 @@ export class JobRunnerService implements OnApplicationBootstrap, OnApplicationSh
       connectionString: this.env.databaseWorkerUrl,
       concurrency: this.env.concurrency,
       noHandleSignals: true,
+      forbiddenFlags: () => this.passedOver.flags(),
       parsedCronItems: [],
       taskList: this.taskList(),
     });

@@ -65,7 +65,7 @@ union all select 'definer function outside the allow-list or without search_path
     and (p.proconfig is null or n.nspname || '.' || p.proname not in (
       'metewand.audit_append', 'identity.find_user', 'identity.memberships_of', 'identity.open_session',
       'identity.rotate_session', 'identity.switch_session', 'identity.end_session', 'identity.caller',
-      'jobs.enqueue', 'jobs.lost_runs'))
+      'jobs.enqueue', 'jobs.call_to_run', 'jobs.lost_runs'))
 union all select 'function that anybody may call', n.nspname || '.' || p.proname
   from pg_proc p join pg_namespace n on n.oid = p.pronamespace
   where n.nspname in ('metewand', 'identity', 'jobs') and has_function_privilege('public', p.oid, 'EXECUTE')

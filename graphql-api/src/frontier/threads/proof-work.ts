@@ -23,9 +23,9 @@ export class ProofWork {
 
   /** Hands out what there is to do and waits until something has come of it. */
   async goOn(): Promise<void> {
-    await this.tasks.exchange(this.threads.hasIdle || this.threads.ready === 0);
+    await this.tasks.exchange(this.threads.idle > 0 || this.threads.ready === 0);
     this.threads.start();
-    while (this.threads.hasIdle) {
+    while (this.threads.idle > 0) {
       const task = this.tasks.next();
       if (task === undefined) break;
       void this.handOut(task);

@@ -27,8 +27,8 @@ export class TaskThreads {
     return this.numberOf(({ isReady }) => isReady);
   }
 
-  get hasIdle(): boolean {
-    return this.numberOf(isIdle) > 0;
+  get idle(): number {
+    return this.numberOf(isIdle);
   }
 
   /** Starts what is missing; later, what has died. */
