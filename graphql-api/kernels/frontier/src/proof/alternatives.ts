@@ -3,7 +3,6 @@ import { picksOf } from '../model/working-portfolio.js';
 import { totalsOf, type Picks } from '../problem/feasible.js';
 import type { Problem } from '../problem/problem.js';
 import { wholeModel } from '../relaxation/narrow-part.js';
-import { reduceProblem } from '../reduction/reduce-problem.js';
 import type { FrontierPoint } from '../search.js';
 import type { Goal } from './goal.js';
 import { OpenNode } from './open-node.js';
@@ -37,8 +36,8 @@ export function alternativesAt(
   { above = 0, effort = 10_000_000 }: AlternativesSettings = {},
 ): Alternatives {
   const { benefit, cost } = totalsOf(problem, picks);
-  const reduced = reduceProblem(problem, 'keep all');
-  const model = reduced.infeasible ? undefined : compileModel(reduced.problem);
+  // the problem as it is: what a reduction leaves out may be part of a next-best portfolio
+  const model = compileModel(problem);
   const part = model && wholeModel(model, cost, cost);
   if (!model || !part) return { count: 0, nextBest: undefined, isExact: true };
   const goal = new AlternativesGoal({ benefit, cost }, above, precisionOf(model));

@@ -23,7 +23,7 @@ export class OpenNode {
   constructor(
     readonly part: OpenPart,
     readonly tangent: Tangent,
-    private readonly known?: KnownPrices,
+    readonly known?: KnownPrices,
     private readonly triesPieces = true,
   ) {}
 
@@ -41,7 +41,7 @@ export class OpenNode {
     if (!relaxation.minimise(middle)) {
       if (middle === open.to || !relaxation.minimise(open.to)) return closed(RELAXATION);
       const lower = { from: middle + 1, to: open.to };
-      const children = this.within(lower, everything(part), tangent, knownFrom(part, relaxation));
+      const children = this.within(lower, everything(part), tangent, relaxation.known());
       return { children, effort: 2 * RELAXATION };
     }
     const losses = lossesAt(part, relaxation.prices);
@@ -78,7 +78,7 @@ export class OpenNode {
     const { tangent } = losses;
     const keep = Uint8Array.from(losses.loss, (loss) => (loss <= stretch.gap ? 1 : 0));
     const shares = relaxation.shares.slice();
-    const known = knownFrom(part, relaxation);
+    const known = relaxation.known();
     const branches = branchAtOption(part, shares, keep);
     if (stretch.to > stretch.from && (!branches || this.strays(tangent, stretch, relaxation))) {
       const middle = Math.floor((stretch.from + stretch.to) / 2);
@@ -121,7 +121,7 @@ export class OpenNode {
         const lowered = tangent.height - there.height + (tangent.slope - there.slope) * middle;
         if (lowered < SHARP_SHARE * stretch.gap) return undefined;
       }
-      children.push(new OpenNode(part, tangent, knownFrom(part, relaxation)));
+      children.push(new OpenNode(part, tangent, relaxation.known()));
     }
     return children;
   }
@@ -148,17 +148,6 @@ function closed(effort: number): Outcome {
 
 function everything({ option }: OpenPart): Uint8Array {
   return new Uint8Array(option.length).fill(1);
-}
-
-function knownFrom(part: OpenPart, { prices, shares }: Relaxation): KnownPrices {
-  const priceById = new Map<number, number>();
-  for (const [place, id] of part.row.entries()) priceById.set(id, prices[place]);
-  const priceOfCost = prices[part.row.length];
-  const inShares = new Set<number>();
-  for (let place = 0; place < shares.length; place++) {
-    if (shares[place] > 0 && shares[place] < 1) inShares.add(part.option[place]);
-  }
-  return { priceOfRow: (id) => priceById.get(id) ?? 0, priceOfCost, inShares };
 }
 
 /** What solving a relaxation counts for, in branches of an enumeration. */

@@ -2,7 +2,7 @@ import type { Model } from '../model/model.js';
 import { narrow, wholeModel } from '../relaxation/narrow-part.js';
 import type { OpenPart } from '../relaxation/open-part.js';
 import { Relaxation } from '../relaxation/relaxation.js';
-import { lossesAt } from './losses.js';
+import { lossesAt, type Losses } from './losses.js';
 import { nodeOf, type ProofNode } from './proof-task.js';
 import type { Stretch, Tangent } from './step-line.js';
 
@@ -26,49 +26,72 @@ export interface ProofStart {
 export function openProof(model: Model, { from, to }: Stretch): Opening {
   const whole = wholeModel(model, from, to);
   if (!whole) return { windows: [], starts: [] };
-  const relaxation = new Relaxation(whole);
-  const windows: ProofNode[] = [];
-  const starts: ProofStart[] = [];
-  const widest = (whole.to - whole.from) / LEAST_WINDOWS;
-  const cut = (stretch: Stretch, depth: number): void => {
-    const middle = Math.floor((stretch.from + stretch.to) / 2);
-    if (!relaxation.minimise(middle)) {
-      if (middle === stretch.to || !relaxation.minimise(stretch.to)) return;
-      cut({ from: middle + 1, to: stretch.to }, depth);
-      return;
-    }
-    const { tangent, best } = lossesAt(whole, relaxation.prices);
-    const width = stretch.to - stretch.from;
-    if (
-      width > 0 &&
-      depth < MOST_HALVINGS &&
-      (width > widest || strays(whole, relaxation, tangent, stretch))
-    ) {
-      cut({ from: stretch.from, to: middle }, depth + 1);
-      cut({ from: middle + 1, to: stretch.to }, depth + 1);
-      return;
-    }
-    const { leastPieces, mostPieces } = whole;
-    const part = narrow(whole, new Uint8Array(whole.option.length).fill(1), {
-      ...stretch,
-      leastPieces,
-      mostPieces,
-    });
-    if (!part) return;
-    windows.push(nodeOf(part, tangent));
-    starts.push({ chosen: chosenOf(whole, best), price: tangent.slope });
-  };
-  cut(whole, 0);
-  return { windows, starts };
+  const cutting = new Cutting(whole);
+  cutting.cut(whole, cutting.heightAt(whole.from), cutting.heightAt(whole.to), 0);
+  return cutting;
 }
 
-function strays(whole: OpenPart, relaxation: Relaxation, tangent: Tangent, { from, to }: Stretch): boolean {
-  const allowed = ALLOWED_STRAY * averageBenefit(whole);
-  return [from, to].some((cost) => {
-    if (!relaxation.minimise(cost)) return false;
-    const there = lossesAt(whole, relaxation.prices).tangent;
-    return tangent.height - there.height + (tangent.slope - there.slope) * cost > allowed;
-  });
+class Cutting implements Opening {
+  readonly windows: ProofNode[] = [];
+  readonly starts: ProofStart[] = [];
+  private readonly relaxation: Relaxation;
+  private readonly widest: number;
+  private readonly allowedStray: number;
+
+  constructor(private readonly whole: OpenPart) {
+    this.relaxation = new Relaxation(whole);
+    this.widest = (whole.to - whole.from) / LEAST_WINDOWS;
+    this.allowedStray = ALLOWED_STRAY * averageBenefit(whole);
+  }
+
+  /** The most benefit in shares at a cost; undefined if nothing costs so little. */
+  heightAt(cost: number): number | undefined {
+    const losses = this.lossesAt(cost);
+    return losses && heightOf(losses.tangent, cost);
+  }
+
+  /** @param low and @param high the most benefit in shares at the ends of the stretch */
+  cut(stretch: Stretch, low: number | undefined, high: number | undefined, depth: number): void {
+    const { from, to } = stretch;
+    const middle = Math.floor((from + to) / 2);
+    const losses = this.lossesAt(middle);
+    if (!losses) {
+      // nothing possible costs so little, whether in shares or whole
+      if (high !== undefined && middle < to) this.cut({ from: middle + 1, to }, undefined, high, depth);
+      else if (high !== undefined) this.cut({ from: to, to }, high, high, depth);
+      return;
+    }
+    const { tangent } = losses;
+    const stray = Math.max(
+      low === undefined ? 0 : heightOf(tangent, from) - low,
+      high === undefined ? 0 : heightOf(tangent, to) - high,
+    );
+    if (to > from && depth < MOST_HALVINGS && (to - from > this.widest || stray > this.allowedStray)) {
+      const height = heightOf(tangent, middle);
+      this.cut({ from, to: middle }, low, height, depth + 1);
+      this.cut({ from: middle + 1, to }, height, high, depth + 1);
+      return;
+    }
+    this.takeWindow(stretch, losses);
+  }
+
+  private takeWindow(stretch: Stretch, { tangent, best }: Losses): void {
+    const { whole } = this;
+    const { leastPieces, mostPieces } = whole;
+    const everything = new Uint8Array(whole.option.length).fill(1);
+    const part = narrow(whole, everything, { ...stretch, leastPieces, mostPieces });
+    if (!part) return;
+    this.windows.push(nodeOf(part, tangent, this.relaxation.known()));
+    this.starts.push({ chosen: chosenOf(whole, best), price: tangent.slope });
+  }
+
+  private lossesAt(cost: number): Losses | undefined {
+    return this.relaxation.minimise(cost) ? lossesAt(this.whole, this.relaxation.prices) : undefined;
+  }
+}
+
+function heightOf({ height, slope }: Tangent, cost: number): number {
+  return height + slope * cost;
 }
 
 function averageBenefit({ benefit }: OpenPart): number {

@@ -1,4 +1,5 @@
 import { optionsOf, type OpenPart } from '../relaxation/open-part.js';
+import type { KnownPrices } from '../relaxation/relaxation.js';
 import type { Tangent } from './step-line.js';
 
 /**
@@ -26,6 +27,8 @@ export interface ProofNode {
   readonly options: Int32Array;
   /** No portfolio of the part lies above it. */
   readonly tangent: Tangent;
+  /** Prices that a relaxation of the part may start from. */
+  readonly known?: KnownPrices;
 }
 
 export interface ProofTaskResult {
@@ -44,8 +47,8 @@ export interface FoundPortfolio {
   readonly chosen: Int32Array;
 }
 
-export function nodeOf(part: OpenPart, tangent: Tangent): ProofNode {
+export function nodeOf(part: OpenPart, tangent: Tangent, known?: KnownPrices): ProofNode {
   const { from, to, leastPieces, mostPieces } = part;
   const most = mostPieces < Infinity ? { mostPieces } : {};
-  return { from, to, leastPieces, ...most, options: optionsOf(part), tangent };
+  return { from, to, leastPieces, ...most, options: optionsOf(part), tangent, ...(known ? { known } : {}) };
 }

@@ -5,40 +5,15 @@ import type { OpenPart, Range } from './open-part.js';
 
 /** Everything open, in a stretch of cost; undefined if no portfolio is possible there. */
 export function wholeModel(model: Model, from: number, to: number): OpenPart | undefined {
-  const { classCount, optionStart, optionBenefit, optionCost, rowMost, rows } = model;
-  const range = { from, to, leastPieces: 0, mostPieces: Infinity };
-  const everything: OpenPart = {
-    model,
-    ...range,
-    settled: new Int32Array(classCount).fill(-1),
-    settledBenefit: 0,
-    settledCost: 0,
-    settledPieces: 0,
-    classCount,
-    start: optionStart,
-    option: Int32Array.from(optionBenefit, (_, option) => option),
-    benefit: optionBenefit,
-    cost: optionCost,
-    row: Int32Array.from(rows, (_, row) => row),
-    rowMost,
-    termStart: model.termStart,
-    termRow: model.termRow,
-    termValue: model.termValue,
-  };
-  return narrow(everything, new Uint8Array(optionBenefit.length).fill(1), range);
+  const keep = new Uint8Array(model.optionBenefit.length).fill(1);
+  return narrow(everythingOpen(model), keep, { from, to, leastPieces: 0, mostPieces: Infinity });
 }
 
-/** The same part with only the options of a list of the model's options, settled ones included. */
+/** The part with only the options of a list of the model's options, one or more for each class. */
 export function partOf(model: Model, options: Int32Array, range: Range): OpenPart | undefined {
-  const whole = wholeModel(model, range.from, range.to);
-  if (whole === undefined) return undefined;
-  const wanted = new Uint8Array(model.optionBenefit.length);
-  for (const option of options) wanted[option] = 1;
-  return narrow(
-    whole,
-    Uint8Array.from(whole.option, (option) => wanted[option]),
-    range,
-  );
+  const keep = new Uint8Array(model.optionBenefit.length);
+  for (const option of options) keep[option] = 1;
+  return narrow(everythingOpen(model), keep, range);
 }
 
 /**
@@ -53,4 +28,29 @@ export function narrow(part: OpenPart, keep: Uint8Array, range: Range): OpenPart
     if (!sums.dropImpossible(keep)) break;
   }
   return buildPart(part, keep, range, sums);
+}
+
+function everythingOpen(model: Model): OpenPart {
+  const { classCount, optionStart, optionBenefit, optionCost, rowMost, rows } = model;
+  return {
+    model,
+    from: 0,
+    to: Infinity,
+    leastPieces: 0,
+    mostPieces: Infinity,
+    settled: new Int32Array(classCount).fill(-1),
+    settledBenefit: 0,
+    settledCost: 0,
+    settledPieces: 0,
+    classCount,
+    start: optionStart,
+    option: Int32Array.from(optionBenefit.keys()),
+    benefit: optionBenefit,
+    cost: optionCost,
+    row: Int32Array.from(rows.keys()),
+    rowMost,
+    termStart: model.termStart,
+    termRow: model.termRow,
+    termValue: model.termValue,
+  };
 }

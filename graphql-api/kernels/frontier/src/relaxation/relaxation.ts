@@ -2,11 +2,14 @@ import { LinearSystem } from './linear-system.js';
 import type { OpenPart } from './open-part.js';
 import { ScaledPart } from './scaled-part.js';
 
-/** Where to start from: prices of rows of the model and of cost, and options that were chosen in shares. */
+/** Where a relaxation found its prices: a start for that of a part of the same part, or at a nearby cost. */
 export interface KnownPrices {
-  priceOfRow(row: number): number;
+  /** Rows of the model, or bounds on pieces, that have a price, and the prices in benefit per unit. */
+  readonly rows: Int32Array;
+  readonly prices: Float64Array;
   readonly priceOfCost: number;
-  readonly inShares: ReadonlySet<number>;
+  /** Options of the model that were chosen in shares. */
+  readonly inShares: Int32Array;
 }
 
 /**
@@ -108,11 +111,26 @@ export class Relaxation {
     return true;
   }
 
+  /** What to start from in a part of this part. */
+  known(): KnownPrices {
+    const { part, prices, shares } = this;
+    const priced = [...part.row.keys()].filter((row) => prices[row] > 0);
+    const inShares = [...shares.keys()].filter((place) => shares[place] > 0 && shares[place] < 1);
+    return {
+      rows: Int32Array.from(priced, (row) => part.row[row]),
+      prices: Float64Array.from(priced, (row) => prices[row]),
+      priceOfCost: prices[part.row.length],
+      inShares: Int32Array.from(inShares, (place) => part.option[place]),
+    };
+  }
+
   private startAt(known: KnownPrices | undefined): void {
     const { part, price, scaled } = this;
     if (known) {
-      for (const [row, id] of part.row.entries())
-        price[row] = scaled.scaledPriceOf(known.priceOfRow(id), row);
+      for (const [row, id] of part.row.entries()) {
+        const at = known.rows.indexOf(id);
+        if (at >= 0) price[row] = scaled.scaledPriceOf(known.prices[at], row);
+      }
       price[part.row.length] = scaled.scaledPriceOf(known.priceOfCost, part.row.length);
     }
     this.readWorths();
@@ -120,7 +138,7 @@ export class Relaxation {
     if (!known) return;
     for (let option = 0; option < part.option.length; option++) {
       const best = this.best[this.classOf[option]];
-      if (option === best || !known.inShares.has(part.option[option])) continue;
+      if (option === best || !known.inShares.includes(part.option[option])) continue;
       if (this.worth[best] - this.worth[option] < TIE && this.ties.length < price.length) this.addTie(option);
     }
     for (let row = 0; row < price.length; row++) if (price[row] > 0) this.setFree(row);
