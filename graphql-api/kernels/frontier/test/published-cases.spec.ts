@@ -1,5 +1,6 @@
 import type { Problem } from '../src/problem/problem.js';
 import { bruteForceFront } from './brute-force.js';
+import { PUBLISHED_BUDGETS } from './published-budgets.js';
 import { LIMITED_SELECTIONS, LORIE_SAVAGE, type PublishedCase } from './published-data.js';
 import { pointsOf, runToEnd } from './run-search.js';
 
@@ -17,16 +18,17 @@ function problemOf({ values, uses, limits }: PublishedCase): Problem {
   };
 }
 
-describe('published selections under limits', () => {
+describe('published selections under several limits', () => {
   it.each(LIMITED_SELECTIONS.map((each) => [each.name, each] as const))(
-    'reaches the published optimum of %s',
+    'end at the published optimum, proven: %s',
     (_, published) => {
-      const result = runToEnd(problemOf(published), { evaluations: 2_000_000 });
+      const result = runToEnd(problemOf(published));
+      expect(result.status).toBe('complete');
       expect(result.points.at(-1)?.benefit).toBe(Math.round(10 * published.optimum));
     },
   );
 
-  it('picks the projects that alone reach the optimum of Lorie and Savage', () => {
+  it('end at the projects that alone reach the optimum of Lorie and Savage', () => {
     const result = runToEnd(problemOf(LORIE_SAVAGE));
     expect(result.points.at(-1)).toEqual({
       benefit: 700,
@@ -36,9 +38,30 @@ describe('published selections under limits', () => {
   });
 
   it.each(
-    LIMITED_SELECTIONS.filter(({ values }) => values.length <= 10).map((each) => [each.name, each] as const),
-  )('finds the same front as brute force for %s', (_, published) => {
+    LIMITED_SELECTIONS.filter(({ values }) => values.length <= 15).map((each) => [each.name, each] as const),
+  )('have the front that brute force finds: %s', (_, published) => {
     const problem = problemOf(published);
+    expect(pointsOf(runToEnd(problem))).toEqual(bruteForceFront(problem));
+  });
+});
+
+describe('published selections within a budget', () => {
+  it.each(PUBLISHED_BUDGETS.map((each) => [each.name, each] as const))(
+    'end at the published optimum, proven: %s',
+    (_, { problem, optimum, chosen }) => {
+      const result = runToEnd(problem);
+      expect(result.status).toBe('complete');
+      const best = result.points.at(-1);
+      expect(best?.benefit).toBe(optimum);
+      if (chosen) expect(Object.keys(best?.picks ?? {}).sort()).toEqual([...chosen].sort());
+    },
+  );
+
+  it.each(
+    PUBLISHED_BUDGETS.filter(({ problem }) => problem.items.length <= 15).map(
+      (each) => [each.name, each] as const,
+    ),
+  )('have the front that brute force finds: %s', (_, { problem }) => {
     expect(pointsOf(runToEnd(problem))).toEqual(bruteForceFront(problem));
   });
 });
@@ -106,6 +129,10 @@ describe('four sales regions with one strategy each', () => {
   );
   const least = benefitsByRegion.reduce((sum, benefits) => sum + Math.min(...benefits), 0);
   const greatest = benefitsByRegion.reduce((sum, benefits) => sum + Math.max(...benefits), 0);
+
+  it('is searched to the end', () => {
+    expect(runToEnd(problem).status).toBe('complete');
+  });
 
   it.each([
     ['search', () => pointsOf(runToEnd(problem))],
