@@ -1,0 +1,29 @@
+import { aTangledProblem } from '../bench/tangled.mjs';
+import { parseProblem } from '../src/problem/parse-problem.js';
+import { bruteForceFront } from './brute-force.js';
+import { runToEnd } from './run-search.js';
+
+describe('problems in which any kind of limit meets any other', () => {
+  it.each(Array.from({ length: 20 }, (_, index) => [100 * index + 1, 100 * index + 100]))(
+    'has the whole front of each, and says so: seeds %i to %i',
+    (first, last) => {
+      let feasible = 0;
+      for (let seed = first; seed <= last; seed++) {
+        const problem = parseProblem(aTangledProblem(seed, sizeOf(seed)));
+        const exact = bruteForceFront(problem);
+        const { status, ...result } = runToEnd(problem, { seed });
+        const front = result.points.map(({ cost, benefit }) => [cost, benefit]);
+        const expected = exact.length > 0 ? 'complete' : 'infeasible';
+        expect({ seed, status, front }).toEqual({ seed, status: expected, front: exact });
+        if (exact.length > 0) feasible++;
+      }
+      // a generator gone astray would make the comparison an empty one
+      expect(feasible).toBeGreaterThan(70);
+    },
+  );
+});
+
+/** Up to 16 items; one in ten problems has 13 or more, because trying every portfolio of those takes long. */
+function sizeOf(seed: number): number {
+  return seed % 10 === 0 ? 13 + ((seed / 10) % 4) : 4 + (seed % 9);
+}
