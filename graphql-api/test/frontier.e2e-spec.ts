@@ -88,6 +88,17 @@ describe('the search over the first demo organisation', () => {
     expect(found.kneeIndex).toBeGreaterThan(0);
   });
 
+  it('says what else there is at a point', async () => {
+    const ASK = `query ($id: ID!, $index: Int!) {
+      run(id: $id) { alternatives(pointIndex: $index) { count isExact nextBest { benefit cost { amount } } } }
+    }`;
+    const last = found.points.length - 1;
+    const { run } = await round.coordinator.get(ASK, { id: found.id, index: last });
+    expect(run.alternatives).toEqual({ count: 1, isExact: true, nextBest: null });
+    const { errors } = await round.coordinator.ask(ASK, { id: found.id, index: last + 1 });
+    expect(errors?.[0].message).toBe('Run 1 has no portfolio with the index 853.');
+  });
+
   it('keeps a sample of what it looked at, and of what it once kept', async () => {
     const { run } = await round.coordinator.get(CHART, { id: found.id });
     expect(run).toMatchObject({

@@ -11,6 +11,7 @@ import { ScoringModule } from '../scoring/scoring.module.js';
 import { Run } from './entities/run.entity.js';
 import { ProblemService } from './problem.service.js';
 import { RoundRunsResolver } from './round-runs.resolver.js';
+import { RunAlternativesService } from './run-alternatives.service.js';
 import { RunDetailsLoader } from './run-details.loader.js';
 import { RunsResolver } from './runs.resolver.js';
 import { RunsService } from './runs.service.js';
@@ -27,7 +28,14 @@ import { RunsService } from './runs.service.js';
     RoundsModule,
     ScoringModule,
   ],
-  providers: [RunsService, ProblemService, RunsResolver, RoundRunsResolver, RunDetailsLoader],
+  providers: [
+    RunsService,
+    ProblemService,
+    RunAlternativesService,
+    RunsResolver,
+    RoundRunsResolver,
+    RunDetailsLoader,
+  ],
   exports: [RunsService, ProblemService],
 })
 export class FrontierModule {}

@@ -45,7 +45,7 @@ export class RunRows {
     };
   }
 
-  private point({ benefit, cost, picks }: FrontierPoint): RunPointRow {
+  point({ benefit, cost, picks }: FrontierPoint): RunPointRow {
     const indices = Object.keys(picks).map((id) => this.indexOf.get(id) ?? -1);
     return { benefit, cost, picks: indices.sort((one, other) => one - other) };
   }

@@ -9,12 +9,14 @@ import { StartSearchResult } from './dto/start-search.result.js';
 import { Run } from './entities/run.entity.js';
 import {
   ChartPoints,
+  PointAlternatives,
   RunCertificate,
   RunItem,
   RunLeftOut,
   RunPoint,
   RunProgress,
 } from './models/run-parts.model.js';
+import { RunAlternativesService } from './run-alternatives.service.js';
 import { RunDetailsLoader } from './run-details.loader.js';
 import { certificateView, chartView, itemViews, pointViews, progressView } from './run-views.js';
 import { RunsService } from './runs.service.js';
@@ -24,6 +26,7 @@ export class RunsResolver {
   constructor(
     private readonly runs: RunsService,
     private readonly rounds: RoundsService,
+    private readonly alternativesOf: RunAlternativesService,
     private readonly detailsById: RunDetailsLoader,
     private readonly membershipsById: MembershipsByIdLoader,
   ) {}
@@ -93,6 +96,11 @@ export class RunsResolver {
   async points(@Parent() { id, costAxis }: Run) {
     const { items, progress, result } = await this.detailsById.load(id);
     return pointViews(result ?? progress, items, costAxis);
+  }
+
+  @ResolveField(() => PointAlternatives)
+  alternatives(@Parent() run: Run, @Args('pointIndex', { type: () => Int }) pointIndex: number) {
+    return this.alternativesOf.ofPoint(run, pointIndex);
   }
 
   @ResolveField(() => Int, {

@@ -9,6 +9,9 @@ export const DEFAULT_SEED = 1;
 /** Points kept of those looked at, for the chart. */
 export const LOOKED_AT_SAMPLE = 5_000;
 
+/** Branches looked at for the alternatives of a point: some hundredths of a second, so that the API can answer by itself. */
+export const ALTERNATIVES_EFFORT = 50_000;
+
 /** How often a search says where it is, at most. */
 export const REPORT_MS = 500;
 

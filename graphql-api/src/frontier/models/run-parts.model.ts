@@ -37,6 +37,24 @@ export class RunPoint {
   atMostMore: string | null;
 }
 
+@ObjectType({ description: 'What else there is at the cost of a point.' })
+export class PointAlternatives {
+  @Field(() => Int, {
+    description: 'Portfolios with just this benefit and cost, the point’s own among them.',
+  })
+  count: number;
+
+  @Field(() => RunPoint, {
+    nullable: true,
+    description:
+      'The best of the same cost with less benefit, where it has more than the next cheaper point.',
+  })
+  nextBest: RunPoint | null;
+
+  @Field({ description: 'False: not all could be looked at in time, so there may be more and better ones.' })
+  isExact: boolean;
+}
+
 @ObjectType({ description: 'A candidate by its quote in force, as frozen when the run was started.' })
 export class RunItem {
   @Field(() => ID)
