@@ -48,7 +48,13 @@ export class FrontierProof {
       for (const piece of piecesOf(nodes)) {
         const id = `${this.round}.${this.windowOf.size}`;
         this.windowOf.set(id, window);
-        this.waiting.push({ id, nodes: piece, known: knownFor(piece, points), effort });
+        this.waiting.push({
+          id,
+          nodes: piece,
+          known: knownFor(piece, points),
+          dives: this.round < DIVING_ROUNDS,
+          effort,
+        });
       }
       nodes.length = 0;
     }
@@ -122,7 +128,8 @@ function placeAfter(points: readonly Point[], cost: number): number {
 }
 
 /** Efforts in branches of an enumeration: at first some milliseconds a window, later about a second a task. */
-const FIRST_EFFORT = 6_000;
-const EFFORT_GROWTH = 16;
+const FIRST_EFFORT = 3_000;
+const EFFORT_GROWTH = 32;
 const MOST_EFFORT = 2_000_000;
 const MOST_PIECES = 8;
+const DIVING_ROUNDS = 2;

@@ -3,6 +3,7 @@ import type { OpenPart } from '../relaxation/open-part.js';
 import { Relaxation, type KnownPrices } from '../relaxation/relaxation.js';
 import { branchAtFirst, branchAtOption, branchAtPieces } from './branching.js';
 import { Deviations } from './deviations.js';
+import { dive } from './dive.js';
 import { Enumeration } from './enumeration.js';
 import type { Goal } from './goal.js';
 import { lossesAt, type Losses } from './losses.js';
@@ -25,6 +26,7 @@ export class OpenNode {
     readonly tangent: Tangent,
     readonly known?: KnownPrices,
     private readonly triesPieces = true,
+    private readonly dives = false,
   ) {}
 
   /** How far below the tangent something wanted may lie; below nought if nothing is left to find. */
@@ -51,9 +53,10 @@ export class OpenNode {
     const enumeration = this.enumerate(goal, losses, prices, rest);
     const effort = RELAXATION + enumeration.branches;
     if (enumeration.isThrough) return closed(effort);
+    const dived = this.dives ? dive(part, { relaxation, losses }, rest, goal) : 0;
     const left = goal.gapBelow(losses.tangent, rest);
-    if (!left) return closed(effort);
-    return this.split(losses, left, relaxation, effort);
+    if (!left) return closed(effort + dived);
+    return this.split(losses, left, relaxation, effort + dived);
   }
 
   private enumerate(

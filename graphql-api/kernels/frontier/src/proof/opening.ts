@@ -56,9 +56,8 @@ class Cutting implements Opening {
     const middle = Math.floor((from + to) / 2);
     const losses = this.lossesAt(middle);
     if (!losses) {
-      // nothing possible costs so little, whether in shares or whole
-      if (high !== undefined && middle < to) this.cut({ from: middle + 1, to }, undefined, high, depth);
-      else if (high !== undefined) this.cut({ from: to, to }, high, high, depth);
+      // nothing possible costs so little, in shares or whole
+      if (middle < to && high !== undefined) this.cut({ from: middle + 1, to }, undefined, high, depth);
       return;
     }
     const { tangent } = losses;

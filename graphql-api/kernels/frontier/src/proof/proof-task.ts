@@ -12,6 +12,8 @@ export interface ProofTask {
   readonly nodes: readonly ProofNode[];
   /** Points [cost, benefit] known in the stretches of the nodes, and the last one before. */
   readonly known: readonly (readonly [cost: number, benefit: number])[];
+  /** Whether to look for good portfolios below each node first. */
+  readonly dives: boolean;
   /** About how much work to do before the rest is handed back: branches of the enumeration, or as much time. */
   readonly effort: number;
 }

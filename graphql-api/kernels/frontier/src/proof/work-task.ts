@@ -18,7 +18,7 @@ export function workTask(model: Model, task: ProofTask): ProofTaskResult {
   const open = new WidestFirst<OpenNode>();
   for (const node of task.nodes) {
     const part = partOf(model, node.options, rangeOf(node));
-    if (part) file(open, new OpenNode(part, node.tangent, node.known), goal);
+    if (part) file(open, new OpenNode(part, node.tangent, node.known, true, task.dives), goal);
   }
   let effort = 0;
   while (open.size > 0 && effort < task.effort) {

@@ -47,6 +47,7 @@ export function exactSliceSearch(problem: Problem): SliceSearch {
         id: '',
         nodes,
         known: points,
+        dives: false,
         effort: Math.min(effort - spent, ONE_GO),
       });
       spent += result.effort;
