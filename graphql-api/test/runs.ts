@@ -58,7 +58,7 @@ const RUN = `query ($id: ID!) {
   }
 }`;
 
-const ENDED = ['FINISHED', 'STOPPED', 'INFEASIBLE', 'FAILED'];
+export const ENDED = ['FINISHED', 'STOPPED', 'INFEASIBLE', 'FAILED'];
 
 /** What startSearch answers: a run, or a refusal. */
 export async function startSearch(member: Member, roundId: string, settings: Record<string, unknown> = {}) {
