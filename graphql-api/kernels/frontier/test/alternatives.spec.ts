@@ -47,6 +47,6 @@ describe('the other portfolios at a point', () => {
         points++;
       }
     }
-    expect(points).toBeGreaterThan(300);
+    expect(points).toBeGreaterThan(250);
   });
 });
