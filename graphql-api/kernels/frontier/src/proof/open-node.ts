@@ -26,7 +26,6 @@ export class OpenNode {
     readonly tangent: Tangent,
     readonly known?: KnownPrices,
     private readonly triesPieces = true,
-    private readonly dives = false,
   ) {}
 
   /** How far below the tangent something wanted may lie; below nought if nothing is left to find. */
@@ -53,10 +52,20 @@ export class OpenNode {
     const enumeration = this.enumerate(goal, losses, prices, rest);
     const effort = RELAXATION + enumeration.branches;
     if (enumeration.isThrough) return closed(effort);
-    const dived = this.dives ? dive(part, { relaxation, losses }, rest, goal) : 0;
     const left = goal.gapBelow(losses.tangent, rest);
-    if (!left) return closed(effort + dived);
-    return this.split(losses, left, relaxation, effort + dived);
+    if (!left) return closed(effort);
+    return this.split(losses, left, relaxation, effort);
+  }
+
+  /** Looks for good portfolios below the node, which stays as open as it was. Returns the effort. */
+  dive(goal: Goal): number {
+    const { part, tangent, known } = this;
+    const open = goal.gapBelow(tangent, part);
+    if (!open) return 0;
+    const relaxation = new Relaxation(part, known);
+    if (!relaxation.minimise(Math.floor((open.from + open.to) / 2))) return RELAXATION;
+    const losses = lossesAt(part, relaxation.prices);
+    return RELAXATION + dive(part, { relaxation, losses }, open, goal);
   }
 
   private enumerate(

@@ -41,7 +41,8 @@ class Cutting implements Opening {
   constructor(private readonly whole: OpenPart) {
     this.relaxation = new Relaxation(whole);
     this.widest = (whole.to - whole.from) / LEAST_WINDOWS;
-    this.allowedStray = ALLOWED_STRAY * averageBenefit(whole);
+    this.allowedStray =
+      ALLOWED_STRAY * averageBenefit(whole) * Math.max(1, whole.option.length / MANY_OPTIONS);
   }
 
   /** The most benefit in shares at a cost; undefined if nothing costs so little. */
@@ -106,3 +107,5 @@ function chosenOf(part: OpenPart, best: Int32Array): Int32Array {
 const LEAST_WINDOWS = 24;
 const MOST_HALVINGS = 9;
 const ALLOWED_STRAY = 0.02;
+/** Beyond so many, relaxations take longer and gaps are narrow in any case. */
+const MANY_OPTIONS = 1_000;

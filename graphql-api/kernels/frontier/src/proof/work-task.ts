@@ -16,11 +16,14 @@ export function workTask(model: Model, task: ProofTask): ProofTaskResult {
   const goal = new FrontierGoal(line, precisionOf(model));
   // a gap only shrinks as points are found: the one a node is filed under is an upper bound
   const open = new WidestFirst<OpenNode>();
+  let effort = 0;
   for (const node of task.nodes) {
     const part = partOf(model, node.options, rangeOf(node));
-    if (part) file(open, new OpenNode(part, node.tangent, node.known, true, task.dives), goal);
+    if (!part) continue;
+    const openNode = new OpenNode(part, node.tangent, node.known);
+    if (task.dives) effort += openNode.dive(goal);
+    file(open, openNode, goal);
   }
-  let effort = 0;
   while (open.size > 0 && effort < task.effort) {
     const outcome = open.take()!.work(goal);
     effort += outcome.effort;

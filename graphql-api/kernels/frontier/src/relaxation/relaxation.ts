@@ -46,6 +46,7 @@ export class Relaxation {
   private readonly tiesInClass: Int32Array;
 
   private readonly worth: Float64Array;
+  private stepsSinceReading = 0;
   private readonly slope: Float64Array;
   private readonly direction: Float64Array;
   private readonly left: Float64Array;
@@ -172,7 +173,8 @@ export class Relaxation {
       for (const row of [...free]) if (!independentPrices.includes(row)) this.unsetFree(row);
     }
     this.meetTies();
-    this.readWorths();
+    // the walk has moved the worths along; from time to time they are added up anew, so that no rounding piles up
+    if (this.stepsSinceReading >= STEPS_BETWEEN_READINGS) this.readWorths();
   }
 
   private layTies(): void {
@@ -199,6 +201,7 @@ export class Relaxation {
   }
 
   private readWorths(): void {
+    this.stepsSinceReading = 0;
     const { worth, price, scaled } = this;
     const { termStart, termRow, termValue } = scaled;
     for (let option = 0; option < worth.length; option++) {
@@ -278,6 +281,9 @@ export class Relaxation {
       if (direction[row] !== 0) price[row] = Math.max(0, price[row] + stop.distance * direction[row]);
     }
     if (stop.kind === 'zero') price[stop.row] = 0;
+    const { worth, slope } = this;
+    for (let option = 0; option < worth.length; option++) worth[option] += stop.distance * slope[option];
+    this.stepsSinceReading++;
     this.exchange(obstacle, stop);
     return true;
   }
@@ -451,4 +457,5 @@ const SMALLEST_PIVOT = 1e-9;
 const ALLOWED = 1e-9;
 const STILL = 1e-12;
 const TIE = 1e-9;
+const STEPS_BETWEEN_READINGS = 16;
 const SURELY = 1e-7;
