@@ -1,5 +1,5 @@
 import { Logger } from '@nestjs/common';
-import type { HeldRun, RunLeasesService } from './run-leases.service.js';
+import type { HeldRun, LeaseAnswer, RunLeasesService } from './run-leases.service.js';
 import type { RunProgressRow } from './run-result.js';
 import type { SearchHost } from './search-host.js';
 import { HEARTBEAT_MS } from './search-settings.js';
@@ -9,7 +9,9 @@ export class LeaseKeeper {
   private readonly log = new Logger('Lease');
   private readonly timer = setInterval(() => this.renew(), HEARTBEAT_MS);
   private isLost = false;
+  /** Not saved yet. */
   private latest: RunProgressRow | undefined;
+  private savesFrom = -Infinity;
   private renewal: Promise<void> | undefined;
 
   constructor(
@@ -23,10 +25,10 @@ export class LeaseKeeper {
     return this.isLost;
   }
 
-  /** Passes over progress that comes faster than the database takes it. */
+  /** Passes over progress that would keep the database busy: a large front is saved seldom. */
   report(progress: RunProgressRow): void {
     this.latest = progress;
-    this.renew();
+    if (performance.now() >= this.savesFrom) this.renew();
   }
 
   async end(): Promise<void> {
@@ -40,7 +42,7 @@ export class LeaseKeeper {
 
   private async renewOnce(): Promise<void> {
     try {
-      const answer = await this.leases.renew(this.run, this.latest);
+      const answer = await this.save();
       if (answer === 'STOP') this.search.stop();
       if (answer !== 'LOST') return;
       this.isLost = true;
@@ -50,4 +52,17 @@ export class LeaseKeeper {
       this.log.warn(`run ${this.run.id}: ${String(error)}`);
     }
   }
+
+  private async save(): Promise<LeaseAnswer> {
+    const began = performance.now();
+    const progress = began >= this.savesFrom ? this.latest : undefined;
+    if (progress) this.latest = undefined;
+    const answer = await this.leases.renew(this.run, progress);
+    const now = performance.now();
+    if (progress) this.savesFrom = now + PAUSE_PER_SAVE * (now - began);
+    return answer;
+  }
 }
+
+/** Between two savings of progress lies at least so many times what a saving takes. */
+const PAUSE_PER_SAVE = 10;

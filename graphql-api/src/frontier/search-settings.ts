@@ -17,7 +17,8 @@ export const REPORT_MS = 500;
 
 /** How long the worker that holds a run may be silent before another takes it over. */
 export const LEASE_SECONDS = 30;
-export const HEARTBEAT_MS = 10_000;
+/** As often it hears whether somebody wants the run to stop. */
+export const HEARTBEAT_MS = 2_000;
 export const SWEEP_MS = 10_000;
 
 /** The same for a task of a run that several workers share. */
