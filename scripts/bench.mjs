@@ -1,20 +1,21 @@
 import { existsSync, readdirSync } from 'node:fs';
-import { join } from 'node:path';
+import { basename, join } from 'node:path';
 import { checkNode, compile, installDependencies, step } from './ground.mjs';
 import { runVerb } from './processes.mjs';
 import { root } from './root.mjs';
 
-// Runs graphql-api/kernels/*/bench/*.bench.mjs; `npm run bench -- frontier` runs those whose path contains "frontier",
-// and hands them what follows: `npm run bench -- frontier T7 --seed 5`.
+// Runs the benches of the kernels, graphql-api/kernels/*/bench/*.bench.mjs, and of the started product,
+// scripts/bench/*.bench.mjs; `npm run bench -- frontier` runs frontier.bench.mjs alone, and hands it what follows:
+// `npm run bench -- frontier T7 --seed 5`.
 
-const [wanted = '', ...args] = process.argv.slice(2);
+const [wanted, ...args] = process.argv.slice(2);
 
 await runVerb('bench', async (processes) => {
   checkNode();
   await installDependencies(processes);
   await step('Build: API and kernels', () => compile(processes));
   let failures = 0;
-  for (const bench of benches().filter((path) => path.includes(wanted))) {
+  for (const bench of benches().filter((path) => !wanted || basename(path) === `${wanted}.bench.mjs`)) {
     console.log(`\n${bench}`);
     const { code } = await processes.run([process.execPath, bench, ...args], { cwd: root });
     if (code !== 0) failures += 1;
@@ -24,8 +25,7 @@ await runVerb('bench', async (processes) => {
 
 function benches() {
   const kernels = 'graphql-api/kernels';
-  return readdirSync(join(root, kernels))
-    .map((kernel) => `${kernels}/${kernel}/bench`)
+  return [...readdirSync(join(root, kernels)).map((kernel) => `${kernels}/${kernel}/bench`), 'scripts/bench']
     .filter((folder) => existsSync(join(root, folder)))
     .flatMap((folder) => readdirSync(join(root, folder)).map((file) => `${folder}/${file}`))
     .filter((path) => path.endsWith('.bench.mjs'));
