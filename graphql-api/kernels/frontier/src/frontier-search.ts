@@ -45,7 +45,7 @@ export class FrontierSearch {
   ) {
     const { seed = 1, evaluations = 20_000_000, effort = Infinity, lookedAtSample = 20_000 } = settings;
     this.seed = seed;
-    this.mostEvaluations = Math.min(evaluations, sensibleEvaluations(model));
+    this.mostEvaluations = Math.min(evaluations, sensibleEvaluations(model, LEAST_EVALUATIONS));
     this.mostEffort = effort;
     this.reportEvery = settings.reportEvery ?? 250_000;
     this.search = new LocalSearch(model, seed, lookedAtSample);
@@ -112,7 +112,7 @@ export class FrontierSearch {
 
   progress(): SearchProgress {
     this.reportedAt = this.lookedAt;
-    this.front.offerAll(this.search.archive.front);
+    this.front.offerNew(this.search.archive.front);
     const { front } = this.front;
     const bestBenefit = front.size > 0 ? front.benefitAt(front.size - 1) : undefined;
     return {
@@ -183,10 +183,18 @@ export class FrontierSearch {
     }
   }
 
+  /** What each portfolio takes is worked out when asked for: written out for all of a large front it fills memory. */
   private portfolios(): FrontierPoint[] {
+    const { model } = this;
     const { front } = this.front;
     return front.points().map(([cost, benefit], place) => {
-      return { benefit, cost, picks: picksOf(this.model, front.choicesAt(place)) };
+      return {
+        benefit,
+        cost,
+        get picks() {
+          return picksOf(model, front.choicesAt(place));
+        },
+      };
     });
   }
 
@@ -204,24 +212,28 @@ export class FrontierSearch {
   }
 
   private notesOfMiss(): string[] {
-    if (this.proof?.isComplete) return [NOTHING_KEEPS_ALL];
-    const found = 'No portfolio was found that keeps every limit and link; that there is none is not proven.';
-    const broken = this.search.nearestMiss();
-    return broken.length === 0
-      ? [found]
-      : [found, `The nearest one found still breaks this: ${broken.join('; ')}.`];
+    return this.proof?.isComplete ? [NOTHING_KEEPS_ALL] : notesOfMiss(this.search.nearestMiss());
   }
 }
 
-/** Where there are few portfolios, looking at each of them many times over is enough. */
-function sensibleEvaluations({ classCount, optionStart }: Model): number {
+/** Where there are few portfolios, looking at each of them many times over is enough; `least` in any case. */
+export function sensibleEvaluations({ classCount, optionStart }: Model, least: number): number {
   let portfolios = 1;
   for (let k = 0; k < classCount; k++) portfolios *= optionStart[k + 1] - optionStart[k];
-  return Math.max(1_000, 64 * portfolios);
+  return Math.max(least, 64 * portfolios);
+}
+
+/** What is to be said where nothing was found. `broken`: what the nearest portfolio still breaks. */
+export function notesOfMiss(broken: readonly string[]): string[] {
+  const found = 'No portfolio was found that keeps every limit and link; that there is none is not proven.';
+  return broken.length === 0
+    ? [found]
+    : [found, `The nearest one found still breaks this: ${broken.join('; ')}.`];
 }
 
 export const NOTHING_KEEPS_ALL = 'No portfolio keeps all limits and links together.';
 
+const LEAST_EVALUATIONS = 1_000;
 const EVALUATIONS_PER_OPTION = 1_000;
 const MOST_FIRST_EVALUATIONS = 500_000;
 const EVALUATIONS_GROWTH = 5;
