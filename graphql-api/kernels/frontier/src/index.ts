@@ -27,7 +27,14 @@ export { kneeOf } from './archive/knee.js';
 export { ParetoFront } from './archive/pareto-front.js';
 export { parseProblem } from './problem/parse-problem.js';
 export { ProblemError } from './problem/problem-error.js';
-export { PROBLEM_FORMAT, type Count, type Item, type Limit, type Problem } from './problem/problem.js';
+export {
+  hasSecondCost,
+  PROBLEM_FORMAT,
+  type Count,
+  type Item,
+  type Limit,
+  type Problem,
+} from './problem/problem.js';
 export { Random } from './local-search/random.js';
 export type { FrontierSearch } from './frontier-search.js';
 export type { ProofTask, ProofTaskResult } from './proof/proof-task.js';
@@ -43,6 +50,13 @@ export {
   type SearchSettings,
   type StopSearch,
 } from './search.js';
+export {
+  searchThreeObjectives,
+  type ThreeObjectivesPoint,
+  type ThreeObjectivesResult,
+} from './three-objectives/search-three-objectives.js';
+export { surfaceCertificate, type SurfaceCertificate } from './three-objectives/surface-certificate.js';
+export { dominatedVolume, type SurfacePoint } from './three-objectives/dominated-volume.js';
 export { marginalUtilities, marginalUtilityKnee } from './archive/marginal-utility-knee.js';
 export { cheapestExchange, type Exchange } from './explain/cheapest-exchange.js';
 export { coreIndex, type CoreIndex, type CostWindow, type Share } from './explain/core-index.js';

@@ -6,14 +6,18 @@ import { workTask } from './proof/work-task.js';
 import { reduceProblem } from './reduction/reduce-problem.js';
 import type { Picks } from './problem/feasible.js';
 import { ProblemError } from './problem/problem-error.js';
-import type { Problem } from './problem/problem.js';
+import { hasSecondCost, type Problem } from './problem/problem.js';
+import {
+  searchThreeObjectives,
+  type ThreeObjectivesResult,
+} from './three-objectives/search-three-objectives.js';
 
 export interface SearchSettings {
   /** The same problem and settings give the same result, whenever and wherever. 1 if left out. */
   readonly seed?: number;
   /** Portfolios the local search may look at before it leaves the field to the proof; 20 million if left out. */
   readonly evaluations?: number;
-  /** Branches the proof may look at; as many as it takes if left out. With 0 nothing is proven. */
+  /** Branches the proof may look at. If left out: as many as it takes, with a second cost 300 million. */
   readonly effort?: number;
   /** About how many evaluations lie between two reports; a quarter million if left out. */
   readonly reportEvery?: number;
@@ -78,11 +82,14 @@ export interface SearchResult extends ProvenSoFar {
  * Looks for the portfolios that no other feasible portfolio beats in benefit and cost, and proves that none is missing,
  * on one thread. Yields a progress now and then; the host decides whether to go on, and ends it early with
  * `next({ stop: true })`. FrontierSearch is the same for several threads or machines, with the same result.
+ *
+ * Where an item has a second cost, there are three objectives, and the result is a ThreeObjectivesResult.
  */
 export function* searchFrontier(
   problem: Problem,
   settings: SearchSettings = {},
-): Generator<SearchProgress, SearchResult, StopSearch | undefined> {
+): Generator<SearchProgress, SearchResult | ThreeObjectivesResult, StopSearch | undefined> {
+  if (hasSecondCost(problem)) return yield* searchThreeObjectives(problem, settings);
   const begun = beginSearch(problem, settings);
   if ('result' in begun) return begun.result;
   const { search, model } = begun;
@@ -96,7 +103,8 @@ export function* searchFrontier(
 
 /**
  * Compiles a problem for a search whose tasks may be worked on elsewhere: anyone who has the problem gets the same
- * model. Or the result at once, where what is asked for can be seen to collide.
+ * model. Or the result at once, where what is asked for can be seen to collide. Throws a ProblemError for a second
+ * cost: with three objectives nothing is handed out.
  */
 export function beginSearch(
   problem: Problem,

@@ -60,7 +60,7 @@ describe('the knee', () => {
 });
 
 describe('the frontier document', () => {
-  it('carries the points and claims no proof', () => {
+  it('carries the points and what is proven of them', () => {
     const problem = twoNeedsAndAHoist();
     const result = runToEnd(problem, { seed: 4 });
     expect(toFrontierDocument(problem, result, facts)).toEqual({
@@ -70,14 +70,46 @@ describe('the frontier document', () => {
       seed: 4,
       points: result.points,
       certificate: {
-        status: 'unproven',
-        provenStretches: [],
-        bound: [],
+        status: 'complete',
+        rules: {
+          dominance: expect.stringMatching(/at least as good in benefit and cost and better in one/),
+          ties: expect.stringMatching(/the same benefit and cost .* in the order of the problem's items/),
+        },
+        provenStretches: [[0, 100]],
+        bound: TWO_NEEDS_AND_A_HOIST_FRONT,
         hypervolume: 6261,
+        hypervolumeBound: 6261,
         reference: { benefit: 0, cost: 100 },
       },
       counts: result.counts,
       notes: [],
+    });
+  });
+
+  it('has volumes, a surface bound and the rules of three objectives where there is a second cost', () => {
+    const items = [
+      { id: 'bought', benefit: 8, cost: 10, secondCost: 1, oneOf: 'scanner' },
+      { id: 'leased', benefit: 8, cost: 2, secondCost: 5, oneOf: 'scanner' },
+    ];
+    const problem = aProblem([], { ceiling: 20, items });
+    const { points, certificate } = toFrontierDocument(problem, runToEnd(problem), facts);
+    expect(points).toContainEqual({ benefit: 8, cost: 10, secondCost: 1, picks: { bought: 1 } });
+    expect(certificate).toMatchObject({
+      status: 'complete',
+      rules: { dominance: expect.stringMatching(/benefit, cost and second cost/) },
+      bound: [
+        [0, 0],
+        [2, 8],
+      ],
+      surfaceBound: [
+        [0, 0, 0],
+        [2, 8, 5],
+        [10, 8, 1],
+      ],
+      provenSecondCosts: [[0, 5]],
+      hypervolume: 8 * 10 * 4,
+      hypervolumeBound: 8 * 10 * 4,
+      reference: { benefit: 0, cost: 20, secondCost: 5 },
     });
   });
 

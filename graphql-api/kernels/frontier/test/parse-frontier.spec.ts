@@ -23,6 +23,7 @@ describe('a frontier read from JSON', () => {
     const facts = { fingerprint: SOME_FINGERPRINT, threads: 1, seconds: 0.5 };
     const document = toFrontierDocument(problem, runToEnd(problem), facts);
     expect(parseFrontier(written(document))).toEqual(document);
+    expect(document.certificate.rules.ties).not.toBe('');
   });
 
   it('needs no more than format, fingerprint, points, status and bound', () => {
@@ -80,6 +81,18 @@ describe('a frontier read from JSON', () => {
       withCertificate({ status: 'done' }),
       'certificate.status',
       /one of complete, bounded, unproven, infeasible, found "done"/,
+    ],
+    [
+      'half of the rules',
+      withCertificate({ rules: { dominance: 'more' } }),
+      'certificate.rules.ties',
+      /a value, found nothing/,
+    ],
+    [
+      'rules of numbers',
+      withCertificate({ rules: { dominance: 1, ties: 'none' } }),
+      'certificate.rules.dominance',
+      /a text, found 1/,
     ],
     ['no bound', withCertificate({ bound: undefined }), 'certificate.bound', /a value, found nothing/],
     [

@@ -33,7 +33,11 @@ describe('the schemas', () => {
       expect(fitsProblem(wrong)).toBe(false);
     }
     const { certificate, ...rest } = twoNeedsAndAHoistFrontier();
-    for (const wrong of [rest, { ...rest, certificate: { ...certificate, status: 'done' } }]) {
+    for (const wrong of [
+      rest,
+      { ...rest, certificate: { ...certificate, status: 'done' } },
+      { ...rest, certificate: { ...certificate, rules: { dominance: 'more' } } },
+    ]) {
       expect(() => parseFrontier(wrong)).toThrow();
       expect(fitsFrontier(written(wrong))).toBe(false);
     }
@@ -41,7 +45,9 @@ describe('the schemas', () => {
 
   it('fit the frontiers that are written', () => {
     const infeasible = aProblem(['bed'], { ceiling: 5, mustInclude: ['bed'] });
-    for (const problem of [twoNeedsAndAHoist(), infeasible, aRandomProblem(3, 9)]) {
+    const items = [{ id: 'bed', benefit: 1, cost: 1, secondCost: 4 }];
+    const surface = aProblem([], { items });
+    for (const problem of [twoNeedsAndAHoist(), infeasible, aRandomProblem(3, 9), surface]) {
       const document = toFrontierDocument(problem, runToEnd(problem, { evaluations: 20_000 }), facts);
       expect([fitsFrontier(written(document)), fitsFrontier.errors]).toEqual([true, null]);
     }

@@ -37,7 +37,7 @@ export interface Item {
   readonly most?: number;
   /** Of each inner list at least one item is taken whenever this one is. */
   readonly needs?: readonly (readonly string[])[];
-  /** A third objective. It is read and checked, but searchFrontier refuses it. */
+  /** A third objective, minimised too; 0 where left out while another item has one. */
   readonly secondCost?: number;
 }
 
@@ -50,3 +50,8 @@ export interface Count {
 }
 
 export const PROBLEM_FORMAT = 'metewand-problem/1';
+
+/** Whether there are three objectives: one item with a second cost is enough. */
+export function hasSecondCost({ items }: Problem): boolean {
+  return items.some(({ secondCost }) => secondCost !== undefined);
+}

@@ -25,6 +25,7 @@ export interface ClaimedPoint {
 
 export interface ClaimedCertificate {
   readonly status: (typeof STATUSES)[number];
+  readonly rules?: { readonly dominance: string; readonly ties: string };
   readonly provenStretches?: readonly Pair[];
   readonly bound: readonly Pair[];
   readonly hypervolume?: number;
@@ -103,6 +104,7 @@ function certificate(value: unknown, path: string): ClaimedCertificate {
   if (status === undefined) refuse(join(path, 'status'), `one of ${STATUSES.join(', ')}`, object.status);
   return {
     status,
+    rules: optional(object, 'rules', path, rules),
     bound: list(object.bound, join(path, 'bound'), (pair, at) => numbers<Pair>(pair, at, 2, number)),
     provenStretches: optional(object, 'provenStretches', path, intervals),
     hypervolume: optional(object, 'hypervolume', path, atLeastZero),
@@ -117,6 +119,7 @@ function certificate(value: unknown, path: string): ClaimedCertificate {
 }
 
 const CERTIFICATE_KEYS = [
+  'rules',
   'provenStretches',
   'hypervolume',
   'hypervolumeBound',
@@ -125,6 +128,14 @@ const CERTIFICATE_KEYS = [
   'surfaceBound',
   'provenSecondCosts',
 ];
+
+function rules(value: unknown, path: string): ClaimedCertificate['rules'] {
+  const object = objectWithKeys(value, path, ['dominance', 'ties'], []);
+  return {
+    dominance: text(object.dominance, join(path, 'dominance')),
+    ties: text(object.ties, join(path, 'ties')),
+  };
+}
 
 function reference(value: unknown, path: string): ClaimedCertificate['reference'] {
   const object = objectWithKeys(value, path, ['benefit', 'cost'], ['secondCost']);

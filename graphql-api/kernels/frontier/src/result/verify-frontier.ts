@@ -1,4 +1,4 @@
-import type { Problem } from '../problem/problem.js';
+import { hasSecondCost, type Problem } from '../problem/problem.js';
 import type { ClaimedFrontier } from './parse-frontier.js';
 import { certificateFindings } from './verify-certificate.js';
 import { pointFindings } from './verify-points.js';
@@ -18,12 +18,12 @@ export interface Finding {
  * @param fingerprint of the problem; hashing is the host's part
  */
 export function verifyFrontier(problem: Problem, claimed: ClaimedFrontier, fingerprint: string): Finding[] {
-  const hasSecondCost = problem.items.some((item) => item.secondCost !== undefined);
+  const isSurface = hasSecondCost(problem);
   return [
     ...originFindings(problem, claimed, fingerprint),
-    ...pointFindings(problem, claimed.points, hasSecondCost),
-    ...certificateFindings(problem, claimed, hasSecondCost),
-    ...surfaceFindings(claimed, hasSecondCost),
+    ...pointFindings(problem, claimed.points, isSurface),
+    ...certificateFindings(problem, claimed, isSurface),
+    ...surfaceFindings(claimed, isSurface),
   ];
 }
 

@@ -1,4 +1,4 @@
-import { NOTHING_KEEPS_ALL } from '../frontier-search.js';
+import { notesOfMiss, NOTHING_KEEPS_ALL, sensibleEvaluations } from '../frontier-search.js';
 import { explainInfeasible } from '../explain/explain-infeasible.js';
 import { compileModel } from '../model/compile-model.js';
 import type { Model } from '../model/model.js';
@@ -37,13 +37,14 @@ export function* searchThreeObjectives(
   sliceSearch: (problem: Problem) => SliceSearch = exactSliceSearch,
 ): Generator<SearchProgress, ThreeObjectivesResult, StopSearch | undefined> {
   const { seed = 1, evaluations = 20_000_000, reportEvery = 250_000, lookedAtSample = 20_000 } = settings;
+  const { effort = SENSIBLE_EFFORT } = settings;
   const reasons = explainInfeasible(problem);
   const model = compileModel(problem);
   if (reasons.length > 0 || model === undefined) return infeasible(seed, reasons);
 
   const search = new SurfaceSearch(model, seed, lookedAtSample);
-  const proof = new SurfaceProof(model, search.archive, sliceSearch(problem), settings.effort ?? Infinity);
-  const of = Math.min(evaluations, sensibleEvaluations(model));
+  const proof = new SurfaceProof(model, search.archive, sliceSearch(problem), effort);
+  const of = Math.min(evaluations, sensibleEvaluations(model, LEAST_EVALUATIONS));
   const progress = (): SearchProgress => progressOf(search, proof, model);
   // the bound comes early, the long proof last: a run that is stopped in between has both points and a gap
   let stopped = yield* searchUntil(search, of / 4, reportEvery, progress);
@@ -84,13 +85,6 @@ function* report(
     stop ||= (yield progress())?.stop ?? false;
   }
   return stop;
-}
-
-/** Where there are few portfolios, looking at each of them many times over is enough. */
-function sensibleEvaluations({ classCount, optionStart }: Model): number {
-  let portfolios = 1;
-  for (let k = 0; k < classCount; k++) portfolios *= optionStart[k + 1] - optionStart[k];
-  return Math.max(50_000, 64 * portfolios);
 }
 
 function progressOf({ archive }: SurfaceSearch, proof: SurfaceProof, model: Model): SearchProgress {
@@ -150,13 +144,6 @@ function resultOf(
   };
 }
 
-function notesOfMiss(broken: readonly string[]): string[] {
-  const found = 'No portfolio was found that keeps every limit and link; that there is none is not proven.';
-  return broken.length === 0
-    ? [found]
-    : [found, `The nearest one found still breaks this: ${broken.join('; ')}.`];
-}
-
 function infeasible(seed: number, notes: readonly string[], evaluations = 0): ThreeObjectivesResult {
   return {
     status: 'infeasible',
@@ -174,3 +161,8 @@ function infeasible(seed: number, notes: readonly string[], evaluations = 0): Th
     notes,
   };
 }
+
+/** The surface is wide: a short local search would leave too much to the proof. */
+const LEAST_EVALUATIONS = 50_000;
+/** Some minutes: a small surface needs less, and of a large one no effort proves all. */
+const SENSIBLE_EFFORT = 300_000_000;
