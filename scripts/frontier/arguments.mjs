@@ -7,7 +7,7 @@ export const usage = `Usage:
 solve   writes the frontier on standard output, progress on standard error
         --seconds  ends the search after so long, with what it has (no limit if left out)
         --seed     the same seed gives the same frontier (1)
-        --threads  threads to search with (1)
+        --threads  threads to search with (1; a second cost is searched on one)
 verify  ends with 0 if the frontier holds, else with 1 and the reasons on standard error
         --prove    proves with another solver that nothing is missing
         --seconds  the most that one step of the proof may take (60)`;

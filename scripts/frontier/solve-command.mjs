@@ -1,4 +1,4 @@
-import { parseProblem, toFrontierDocument } from '@metewand/frontier';
+import { hasSecondCost, parseProblem, toFrontierDocument } from '@metewand/frontier';
 import { fingerprintOf } from './fingerprint.mjs';
 import { ProgressLine } from './progress-line.mjs';
 import { readDocument, usingDocument } from './read-document.mjs';
@@ -16,7 +16,7 @@ export async function solveCommand({ problemPath, seconds, seed, threads }) {
   if (wasInterrupted() && result.points.length === 0) return 130;
   const facts = {
     fingerprint: fingerprintOf(problem),
-    threads,
+    threads: hasSecondCost(problem) ? 1 : threads,
     seconds: Number(progress.seconds.toFixed(3)),
   };
   await write(toText(toFrontierDocument(problem, result, facts)));

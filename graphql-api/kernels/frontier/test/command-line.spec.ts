@@ -4,7 +4,7 @@ import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { canonicalText } from '../src/problem/canonical-text.js';
-import type { Problem } from '../src/problem/problem.js';
+import type { Item, Problem } from '../src/problem/problem.js';
 import { parseFrontier, type ClaimedFrontier, type ClaimedPoint } from '../src/result/parse-frontier.js';
 import { claimedOf, twoNeedsAndAHoistFrontier } from './claimed-frontier.js';
 import { aProblem, TWO_NEEDS_AND_A_HOIST_FRONT, twoNeedsAndAHoist } from './examples.js';
@@ -63,6 +63,42 @@ describe('frontier solve', () => {
     expect(await frontier('verify', written('tight.json', tight), resultFile, '--prove')).toMatchObject({
       code: 0,
     });
+  });
+});
+
+describe('frontier solve with a second cost', () => {
+  const three: Problem = {
+    format: 'metewand-problem/1',
+    ceiling: 30,
+    items: [
+      { id: 'bought', benefit: 8, cost: 10, secondCost: 1, oneOf: 'scanner' },
+      { id: 'leased', benefit: 8, cost: 2, secondCost: 5, oneOf: 'scanner' },
+      { id: 'lent', benefit: 8, cost: 2, secondCost: 6, oneOf: 'scanner' },
+      { id: 'hoist', benefit: 4, cost: 7, secondCost: 2, most: 2 },
+    ],
+  };
+  const file = written('second-cost.json', three);
+
+  it('writes a surface that verify accepts and proves', async () => {
+    const { code, out, err } = await frontier('solve', file, '--threads', '2');
+    expect(code).toBe(0);
+    expect(err).toMatch(/9 points, complete/);
+    const result = parseFrontier(JSON.parse(out));
+    expect(result).toMatchObject({ threads: 1, certificate: { provenSecondCosts: [[0, 9]] } });
+    expect(result.points).toContainEqual({ benefit: 8, cost: 10, secondCost: 1, picks: { bought: 1 } });
+    const resultFile = written('second-cost-result.json', result);
+    const proven = await frontier('verify', file, resultFile, '--prove');
+    expect({ code: proven.code, said: linesOf(proven.err) }).toEqual({ code: 0, said: ['proven'] });
+  });
+
+  it('stops at the end of its time with what it has', async () => {
+    const items = aRandomProblem(5, 120).items.map((item, at) => ({ ...item, secondCost: (at * 7) % 23 }));
+    const large = written('large-surface.json', { format: 'metewand-problem/1', items: withoutUses(items) });
+    const { code, out } = await frontier('solve', large, '--seconds', '0.001');
+    expect(code).toBe(0);
+    const result = parseFrontier(JSON.parse(out));
+    expect(result.certificate.stopped).toBe(true);
+    expect(await frontier('verify', large, written('stopped.json', result))).toMatchObject({ code: 0 });
   });
 });
 
@@ -331,6 +367,10 @@ describe('a command line that cannot be followed', () => {
     expect({ code, out }).toEqual({ code: 2, out: '' });
   });
 });
+
+function withoutUses(items: readonly Item[]): Item[] {
+  return items.map((item) => ({ ...item, uses: [] }));
+}
 
 function certified(): ClaimedFrontier {
   return { ...twoNeedsAndAHoistFrontier(), fingerprint: fingerprintOf(problem) };
