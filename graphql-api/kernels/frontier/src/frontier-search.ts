@@ -31,7 +31,8 @@ export class FrontierSearch {
   private proof: FrontierProof | undefined;
   private starts: ProofStart[] = [];
 
-  private readonly firstEvaluations: number;
+  /** Evaluations that the size of the problem asks for in the first round. */
+  private readonly share: number;
   /** Evaluations at which the local search makes way for the proof. */
   private searchUntil: number;
   private round = 0;
@@ -52,11 +53,8 @@ export class FrontierSearch {
     this.front = new ProvenFront(model);
     this.to = model.ceiling < Infinity ? model.ceiling : this.search.archive.mostCost;
     this.step = precisionOf(model).step;
-    this.firstEvaluations = Math.min(
-      MOST_FIRST_EVALUATIONS,
-      EVALUATIONS_PER_OPTION * model.optionCost.length,
-    );
-    this.searchUntil = Math.min(this.firstEvaluations, this.mostEvaluations);
+    this.share = EVALUATIONS_PER_OPTION * model.optionCost.length;
+    this.searchUntil = Math.min(this.share, MOST_AT_FIRST, this.mostEvaluations);
   }
 
   /** Whether all is proven, or the settings allow no more. */
@@ -172,7 +170,7 @@ export class FrontierSearch {
     } else if (!this.isMerged) {
       search.archive.offerAll(front.front);
       this.isMerged = true;
-      const evaluations = this.firstEvaluations * EVALUATIONS_GROWTH ** this.round;
+      const evaluations = this.share * EVALUATIONS_GROWTH ** this.round;
       this.searchUntil = Math.min(this.mostEvaluations, search.archive.evaluations + evaluations);
     } else if (this.isProofSpent) {
       this.searchUntil = this.mostEvaluations;
@@ -235,7 +233,7 @@ export const NOTHING_KEEPS_ALL = 'No portfolio keeps all limits and links togeth
 
 const LEAST_EVALUATIONS = 1_000;
 const EVALUATIONS_PER_OPTION = 1_000;
-const MOST_FIRST_EVALUATIONS = 500_000;
+const MOST_AT_FIRST = 500_000;
 const EVALUATIONS_GROWTH = 5;
 const FIRST_REPORT = 4_000;
 /** Evaluations at a time: a few milliseconds, so that the host can have its say. */

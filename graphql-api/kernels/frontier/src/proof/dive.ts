@@ -77,8 +77,8 @@ function settleHalf(part: OpenPart, shares: Float64Array): Uint8Array | undefine
   return keep;
 }
 
-const CORE = 150;
+const CORE = 100;
 const MOST_DEPTH = 40;
-const BRANCHES = 500;
+const BRANCHES = 2_000;
 const RELAXATION = 500;
 const WHOLE = 1e-6;

@@ -44,7 +44,8 @@ export class FrontierProof {
   startRound(points: readonly Point[]): void {
     this.collectWhatIsLeft();
     const effort = Math.min(MOST_EFFORT, FIRST_EFFORT * EFFORT_GROWTH ** this.round);
-    for (const [window, nodes] of this.windows.entries()) {
+    for (const window of farApartFirst(this.windows.length)) {
+      const nodes = this.windows[window];
       for (const piece of piecesOf(nodes)) {
         const id = `${this.round}.${this.windowOf.size}`;
         this.windowOf.set(id, window);
@@ -97,6 +98,19 @@ export class FrontierProof {
     this.windowOf.clear();
     this.leftOf.clear();
   }
+}
+
+/**
+ * Numbers below a count, each far from those just before it: by their binary digits read backwards. So the front gets
+ * better all along the axis, and not from one end on.
+ */
+function farApartFirst(count: number): number[] {
+  const digits = Math.ceil(Math.log2(Math.max(2, count)));
+  const backwards = (number: number): number =>
+    Number.parseInt(number.toString(2).padStart(digits, '0').split('').reverse().join(''), 2);
+  return Array.from({ length: count }, (_, number) => number).sort(
+    (one, other) => backwards(one) - backwards(other),
+  );
 }
 
 /** What is open in a window, dealt out to a few tasks so that several can go on with it. */
