@@ -108,6 +108,8 @@ describe('a round, from a quote to an approved portfolio', () => {
       await page.getByText(/looked at, .* kept/u).waitFor();
       await picture(page, 'journey-5-searching');
       await page.getByRole('button', { name: 'Run again' }).waitFor();
+      await page.getByText('Proven complete', { exact: true }).waitFor();
+      await page.getByText(/no better portfolio exists at any cost$/u).waitFor();
 
       const slider = page.getByRole('slider', { name: /^Portfolio A/u });
       const box = await slider.boundingBox();

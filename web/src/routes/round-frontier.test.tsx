@@ -94,17 +94,50 @@ test('answers in a sentence that claims no more than is proven', async () => {
 });
 
 test('says how many points could still be missed, and when none could', async () => {
-  const { certificate } = aRun();
+  const { certificate, points } = aRun();
   const bound = { __typename: 'ChartPoints' as const, costs: [100_000, 400_000], benefits: [20, 66] };
-  const bounded = { ...certificate, status: 'BOUNDED' as const, gapPercent: 0.3, bound };
-  const complete = { ...certificate, status: 'COMPLETE' as const };
-  const runs = [aRun({ certificate: bounded }), aRun({ id: 'run-6', number: 6, certificate: complete })];
+  const bounded = { ...certificate, status: 'BOUNDED' as const, gapPercent: 0.3, provenShare: 0.4, bound };
+  const complete = { ...certificate, status: 'COMPLETE' as const, provenShare: 1 };
+  const atMost = ['0', '0', '5.7500', '1.0000'];
+  const bounding = points.map((point, place) => ({ ...point, atMostMore: atMost[place]! }));
+  const runs = [
+    aRun({ state: 'STOPPED', certificate: bounded, points: bounding }),
+    aRun({ id: 'run-6', number: 6, certificate: complete }),
+  ];
   const { user } = await open(linkFor({ runs }));
   const heading = await screen.findByRole('heading', { level: 1 });
   expect(heading).toHaveTextContent('At this cost, at most 5,8 more are possible.');
+  const figures = screen.getByRole('table', { name: /Figures of the selected/u });
+  expect(within(figures).getByRole('row', { name: /^More possible/u })).toHaveTextContent('at most 5,8');
+  expect(screen.getByText(/^Stopped and kept, within 0,3.% of the bound$/u)).toBeVisible();
+  expect(screen.getByText(/^40,?0?.% of the axis proven$/u)).toBeVisible();
   await user.selectOptions(screen.getByLabelText('Run'), '6');
   expect(await screen.findByText('Proven complete')).toBeVisible();
   expect(screen.getByRole('heading', { level: 1 })).toHaveTextContent('Nothing at this cost does better.');
+  expect(screen.getByText(/no better portfolio exists at any cost$/u)).toBeVisible();
+});
+
+test('tells when asked what else there is at the cost of A', async () => {
+  const { points } = aRun();
+  const nextBest = { ...points[2]!, benefit: '58.2500', picks: [0, 1, 3] };
+  const answers = {
+    RunAlternatives: () => ({
+      run: {
+        __typename: 'Run',
+        id: 'run-7',
+        alternatives: { __typename: 'PointAlternatives', count: 4, isExact: true, nextBest },
+      },
+    }),
+  };
+  const link = linkFor({ runs: [aRun()], answers });
+  const { user } = await open(link);
+  await user.click(await screen.findByRole('button', { name: 'Other portfolios here' }));
+  expect(await screen.findByText('3 other portfolios have the same benefit and cost.')).toBeVisible();
+  expect(screen.getByText('Next best at the same cost: 2,0 points less.')).toBeVisible();
+  expect(screen.getByText('It takes in Bone densitometer.')).toBeVisible();
+  expect(screen.getByText('It loses Patient monitors.')).toBeVisible();
+  const asked = link.asked.filter(({ operation }) => operation === 'RunAlternatives');
+  expect(asked).toMatchObject([{ variables: { id: 'run-7', pointIndex: 2 } }]);
 });
 
 test('moves along the kept portfolios by keyboard and puts B on A', async () => {

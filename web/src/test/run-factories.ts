@@ -7,7 +7,7 @@ function eur(amount: string) {
 }
 
 function aPoint(cost: string, benefit: string, picks: number[], capital = cost): Point {
-  return { __typename: 'RunPoint', benefit, picks, cost: eur(cost), capital: eur(capital) };
+  return { __typename: 'RunPoint', benefit, atMostMore: null, picks, cost: eur(cost), capital: eur(capital) };
 }
 
 function aRunItem(code: string, name: string, mandatory = false): RunFieldsFragment['items'][number] {
@@ -45,6 +45,7 @@ export function aRun(over: Partial<RunFieldsFragment> = {}): RunFieldsFragment {
       __typename: 'RunCertificate',
       status: 'UNPROVEN',
       gapPercent: null,
+      provenShare: 0,
       provenStretches: [],
       bound: { __typename: 'ChartPoints', costs: [], benefits: [] },
     },

@@ -1,6 +1,5 @@
 import { useId } from 'react';
 import styled from 'styled-components';
-import { boundAt } from './bound';
 import { ChartAxes } from './chart-axes';
 import { ChartBound } from './chart-bound';
 import { ChartCeiling } from './chart-ceiling';
@@ -29,7 +28,7 @@ interface ChartDrawingProps {
 export function ChartDrawing({ front, geometry, gridValues, chosen, narrow }: ChartDrawingProps) {
   const id = useId();
   const hatch = { gap: `${id}gap`, ceiling: `${id}ceiling` };
-  const { portfolios, bound, scale, knee } = front;
+  const { portfolios, bound, proven, scale, knee } = front;
   const selected = portfolios[chosen.a]!;
   const compared = chosen.b === undefined || chosen.b === chosen.a ? undefined : portfolios[chosen.b];
   const next = gainForMore(portfolios, chosen.a, scale.long);
@@ -45,7 +44,6 @@ export function ChartDrawing({ front, geometry, gridValues, chosen, narrow }: Ch
   });
   const step = shortMoney(scale.long);
   const atKnee = knee === undefined ? undefined : portfolios[knee];
-  const most = boundAt(bound, selected.cost);
   return (
     <Drawing width={geometry.width} height={geometry.height + 10} aria-hidden>
       <Hatches {...hatch} />
@@ -55,7 +53,7 @@ export function ChartDrawing({ front, geometry, gridValues, chosen, narrow }: Ch
       )}
       <ChartBound
         place={([cost, benefit]) => [geometry.x(cost), geometry.y(benefit)]}
-        {...{ bound, portfolios }}
+        {...{ bound, portfolios, proven }}
         hatch={hatch.gap}
       />
       <ChartSteps {...{ geometry, portfolios }} pegs={pegPlaces(front, places, chosen)} />
@@ -69,9 +67,9 @@ export function ChartDrawing({ front, geometry, gridValues, chosen, narrow }: Ch
       )}
       {layout.glass && (
         <ChartGlass
-          {...{ geometry, portfolios, selected, bound }}
+          {...{ geometry, portfolios, selected, bound, proven }}
           glass={layout.glass}
-          atMost={most === undefined || most <= selected.benefit ? undefined : most - selected.benefit}
+          atMost={selected.atMostMore || undefined}
           hatch={hatch.gap}
         />
       )}

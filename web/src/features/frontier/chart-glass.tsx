@@ -5,10 +5,11 @@ import type { Box, Geometry } from './chart-geometry';
 import { px, stepPath } from './chart-geometry';
 import { Shield } from './chart-marks';
 import { Peg } from './chart-steps';
+import type { Front } from './front';
 import { holds } from './place-labels';
 import type { Portfolio } from './portfolio';
 import { PEG_GAP, thinPegs } from './thin-pegs';
-import { points } from './wording';
+import { pointsMore } from './wording';
 
 /** How many times larger the glass may show what lies around A, the best first. */
 const POWERS = [5, 4, 3];
@@ -22,13 +23,23 @@ interface ChartGlassProps {
   portfolios: readonly Portfolio[];
   selected: Portfolio;
   bound: Bound;
+  proven: Front['proven'];
   /** Points that could still be missed at A's cost, where that is known. */
   atMost: number | undefined;
   hatch: string;
 }
 
 /** The surroundings of A enlarged, with the same corner brackets here and there. */
-export function ChartGlass({ geometry, glass, portfolios, selected, bound, atMost, hatch }: ChartGlassProps) {
+export function ChartGlass({
+  geometry,
+  glass,
+  portfolios,
+  selected,
+  bound,
+  proven,
+  atMost,
+  hatch,
+}: ChartGlassProps) {
   const clip = useId();
   const power = powerFor(glass, geometry, portfolios, selected);
   if (power === undefined) return null;
@@ -52,7 +63,7 @@ export function ChartGlass({ geometry, glass, portfolios, selected, bound, atMos
         <rect {...glass} />
       </clipPath>
       <g clipPath={`url(#${clip})`}>
-        <ChartBound place={enlarge} {...{ bound, portfolios, hatch }} />
+        <ChartBound place={enlarge} {...{ bound, portfolios, proven, hatch }} />
         <path
           d={stepPath(steps)}
           className="line"
@@ -71,7 +82,7 @@ export function ChartGlass({ geometry, glass, portfolios, selected, bound, atMos
         />
         <Shield x={atX} y={atY} />
       </g>
-      {atMost !== undefined && <AtMost glass={glass} points={points(atMost)} />}
+      {atMost !== undefined && <AtMost glass={glass} points={pointsMore(atMost)} />}
       <text
         x={glass.x + glass.width - 10}
         y={glass.y + glass.height - 10}

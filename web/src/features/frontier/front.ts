@@ -16,7 +16,10 @@ export interface Front {
   ceiling: Amount;
   knee: number | undefined;
   status: Run['certificate']['status'];
+  /** Empty too when all is proven: there is no gap left to draw. */
   bound: Bound;
+  /** How much of the cost axis is proven, 0 to 1. */
+  provenShare: number;
   /** Stretches of cost within which the set is proven complete. */
   proven: (readonly [from: number, to: number])[];
   scale: RodScale;
@@ -31,7 +34,7 @@ export function frontOf(run: Run): Front | undefined {
   const cheapest = portfolios[0]!.cost;
   const dearest = portfolios.at(-1)!.cost;
   const onCapital = run.costAxis === 'CAPITAL';
-  const { status, bound, provenStretches } = run.certificate;
+  const { status, bound, provenShare, provenStretches } = run.certificate;
   const scale = rodScale(cheapest, onCapital ? Math.max(dearest, Number(run.ceiling.amount)) : dearest);
   return {
     portfolios,
@@ -40,7 +43,8 @@ export function frontOf(run: Run): Front | undefined {
     ceiling: run.ceiling,
     knee: run.kneeIndex ?? undefined,
     status,
-    bound: toBound(bound),
+    bound: status === 'COMPLETE' ? [] : toBound(bound),
+    provenShare,
     proven:
       status === 'COMPLETE'
         ? [[scale.start, scale.end]]

@@ -4,7 +4,7 @@ import { currencySign, formatAmountWhole } from '../../lib/money';
 import type { Front } from './front';
 import type { Portfolio } from './portfolio';
 import { PortfolioLetter } from './portfolio-letter';
-import { points } from './wording';
+import { points, possibleMore } from './wording';
 
 interface PortfolioFiguresProps {
   front: Front;
@@ -52,7 +52,7 @@ interface FigureRow {
   figure: (portfolio: Portfolio) => string;
 }
 
-function rowsOf({ costAxis, ceiling, candidates }: Front): FigureRow[] {
+function rowsOf({ costAxis, ceiling, candidates, status }: Front): FigureRow[] {
   const sign = currencySign(ceiling.currency);
   return [
     ...(costAxis === 'LIFE_CYCLE'
@@ -65,6 +65,7 @@ function rowsOf({ costAxis, ceiling, candidates }: Front): FigureRow[] {
       : []),
     { name: `Capital, ${sign}`, figure: ({ exact }) => formatAmountWhole(exact.capital) },
     { name: 'Benefit points', figure: ({ benefit }) => points(benefit) },
+    { name: 'More possible at this cost', figure: (portfolio) => possibleMore({ status }, portfolio) },
     { name: `Candidates of ${candidates}`, figure: ({ picks }) => String(picks.length) },
     {
       name: `Left under the ceiling, ${sign}`,

@@ -14,12 +14,14 @@ interface PortfolioPanelProps {
   front: Front;
   chosen: Chosen;
   leftOut: Run['leftOut'];
+  /** Below the figures of A: what else there is at its cost. */
+  others?: ReactNode;
   /** At the foot, such as "Send A for approval". */
   footer?: ReactNode;
 }
 
 /** Portfolio A in figures and by its candidates: beside the chart where there is room, below it elsewhere. */
-export function PortfolioPanel({ front, chosen, leftOut, footer }: PortfolioPanelProps) {
+export function PortfolioPanel({ front, chosen, leftOut, others, footer }: PortfolioPanelProps) {
   const selected = front.portfolios[chosen.a]!;
   const compared = chosen.b === undefined ? undefined : front.portfolios[chosen.b];
   return (
@@ -36,6 +38,7 @@ export function PortfolioPanel({ front, chosen, leftOut, footer }: PortfolioPane
         <p className="muted tiny">
           The ceiling is {formatMoneyWhole(front.ceiling)} of capital, the share held back taken off.
         </p>
+        {others}
       </Top>
       <Scroll tabIndex={0} role="group" aria-label="Candidates of the run">
         <CompositionList front={front} selected={selected} />

@@ -7,6 +7,8 @@ export interface Portfolio {
   cost: number;
   capital: number;
   benefit: number;
+  /** No portfolio of at most this cost has more benefit than so much more; undefined while nothing is proven. */
+  atMostMore: number | undefined;
   /** Indices of the run's items, rising. */
   picks: readonly number[];
   aboveCeiling: boolean;
@@ -16,6 +18,7 @@ export interface Portfolio {
 
 interface Point {
   benefit: string;
+  atMostMore?: string | null;
   cost: Amount;
   capital: Amount;
   picks: readonly number[];
@@ -23,11 +26,12 @@ interface Point {
 
 export function toPortfolios(points: readonly Point[], ceiling: Amount): Portfolio[] {
   const most = Number(ceiling.amount);
-  return points.map(({ benefit, cost, capital, picks }, index) => ({
+  return points.map(({ benefit, atMostMore, cost, capital, picks }, index) => ({
     index,
     cost: Number(cost.amount),
     capital: Number(capital.amount),
     benefit: Number(benefit),
+    atMostMore: atMostMore == null ? undefined : Number(atMostMore),
     picks,
     aboveCeiling: Number(capital.amount) > most,
     exact: { cost, capital, benefit },

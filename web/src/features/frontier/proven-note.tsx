@@ -1,14 +1,30 @@
+import { formatPercent } from '../../lib/money';
 import type { Front } from './front';
 import { shortCost } from './wording';
 
+/** More stretches than this are told by their share of the axis alone. */
+const MOST_NAMED = 2;
+
 /** What the filling of the rod says, in words. */
-export function ProvenNote({ front: { proven, status } }: { front: Pick<Front, 'proven' | 'status'> }) {
-  return <span>{provenText(status, proven)}</span>;
+export function ProvenNote({ front }: { front: Proof }) {
+  return <span>{provenText(front)}</span>;
 }
 
-export function provenText(status: Front['status'], proven: Front['proven']): string {
-  if (status === 'COMPLETE') return 'Filled rod: proven complete over the whole length';
-  if (proven.length === 0) return 'Pale rod: nothing proven yet';
-  const stretches = proven.map(([from, to]) => `${shortCost(from)} to ${shortCost(to)}`);
-  return `Filled rod: proven complete from ${stretches.join(', ')}`;
+type Proof = Pick<Front, 'proven' | 'provenShare' | 'status'>;
+
+export function provenText({ status, proven, provenShare }: Proof): string {
+  if (status === 'COMPLETE') return 'Filled rod: proven complete, no better portfolio exists at any cost';
+  if (status !== 'BOUNDED') return 'Pale rod: nothing proven yet';
+  if (proven.length === 0) return 'Pale rod: a bound is proven, no stretch is complete yet';
+  return `Filled rod: ${sharePercent(provenShare)} of the axis is proven complete${stretches(proven)}`;
+}
+
+/** Rounded down: "100 %" is said only of a whole proof. */
+export function sharePercent(share: number): string {
+  return formatPercent(Math.floor(share * 1000) / 1000, 1);
+}
+
+function stretches(proven: Proof['proven']): string {
+  if (proven.length > MOST_NAMED) return '';
+  return `, from ${proven.map(([from, to]) => `${shortCost(from)} to ${shortCost(to)}`).join(' and ')}`;
 }

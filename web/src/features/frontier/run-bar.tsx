@@ -6,6 +6,7 @@ import { Progress } from '../../ui/progress';
 import { Tag } from '../../ui/tag';
 import { RunChoice } from './run-choice';
 import type { RunListed } from './run-choice';
+import { sharePercent } from './proven-note';
 import { elapsedText, isActive, stateTag } from './run-state';
 import { useElapsed } from './use-elapsed';
 import type { Run } from './use-run';
@@ -33,13 +34,16 @@ export function RunBar({ run, runs, mayStop, actions }: RunBarProps) {
       {elapsed !== undefined && <span>{elapsedText(elapsed)}</span>}
       {active && (
         <Rod>
-          <Progress label={`Run ${run.number}`} hideLabel share={run.progress?.share ?? 0} />
+          <Progress label={`Run ${run.number}, proven`} hideLabel share={run.certificate.provenShare} />
         </Rod>
       )}
       {run.progress && (
         <span className="muted">
           {formatNumber(run.progress.lookedAt)} looked at, {formatNumber(run.progress.kept)} kept
         </span>
+      )}
+      {run.certificate.status === 'BOUNDED' && (
+        <span className="muted">{sharePercent(run.certificate.provenShare)} of the axis proven</span>
       )}
       <Actions data-screen-only>{active ? mayStop && <Stop run={run} /> : actions}</Actions>
     </Bar>

@@ -26,6 +26,7 @@ export const RUN_PROGRESS_FIELDS = gql`
     certificate {
       status
       gapPercent
+      provenShare
       provenStretches
       bound {
         costs
@@ -34,6 +35,7 @@ export const RUN_PROGRESS_FIELDS = gql`
     }
     points {
       benefit
+      atMostMore
       picks
       cost {
         amount

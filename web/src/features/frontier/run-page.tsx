@@ -11,6 +11,7 @@ import { AnswerHeading } from './answer-heading';
 import { FrontierChart } from './frontier-chart';
 import { FrontierTable } from './frontier-table';
 import { MarginalGains } from './marginal-gains';
+import { OtherPortfolios } from './other-portfolios';
 import { PortfolioPanel } from './portfolio-panel';
 import { RunBar } from './run-bar';
 import type { RunListed } from './run-choice';
@@ -67,11 +68,13 @@ function WithFront({ round, maySend, run, front, bar }: WithFrontProps) {
   const chosen = useChosen(front.portfolios);
   const table = params.get('view') === 'table';
   const answer = answerOf(front, chosen.a);
-  const footer = maySend && (
-    <SendForApproval {...{ run, front }} selected={front.portfolios[chosen.a]!} roundId={round.id} />
+  const selected = front.portfolios[chosen.a]!;
+  const footer = maySend && <SendForApproval {...{ run, front }} selected={selected} roundId={round.id} />;
+  const others = !isActive(run.state) && (
+    <OtherPortfolios key={selected.index} runId={run.id} {...{ front, selected }} />
   );
   return (
-    <Page panel={<PortfolioPanel {...{ front, chosen, footer }} leftOut={run.leftOut} />}>
+    <Page panel={<PortfolioPanel {...{ front, chosen, others, footer }} leftOut={run.leftOut} />}>
       <AnswerHeading answer={answer} />
       {bar}
       <RunNews run={run} answer={answer} />

@@ -24,13 +24,13 @@ export function stateTag({ state, certificate }: Standing): StateTag {
     case 'WAITING':
       return { text: 'Waiting', tone: 'plain', icon: 'clock' };
     case 'SEARCHING':
-      return { text: 'Searching', tone: 'plain', icon: 'clock' };
+      return { text: searching(certificate), tone: 'plain', icon: 'clock' };
     case 'FAILED':
       return { text: 'Failed', tone: 'bad', icon: 'warn' };
     case 'INFEASIBLE':
       return { text: 'Limits collide', tone: 'bad', icon: 'warn' };
     case 'STOPPED':
-      return { text: `Stopped and kept, ${proof(certificate)}`, tone: 'caution', icon: 'stop' };
+      return { text: `Stopped and kept, ${lowerFirst(proof(certificate))}`, tone: 'caution', icon: 'stop' };
     case 'FINISHED':
       return finishedTag(certificate);
   }
@@ -40,6 +40,17 @@ function finishedTag(certificate: Standing['certificate']): StateTag {
   if (certificate.status === 'COMPLETE') return { text: 'Proven complete', tone: 'good', icon: 'ok' };
   if (certificate.status === 'BOUNDED') return { text: proof(certificate), tone: 'caution', icon: 'clock' };
   return { text: `Ended, ${proof(certificate)}`, tone: 'caution', icon: 'warn' };
+}
+
+/** The gap beside the word once one is proven: while a search goes on, it shrinks. */
+function searching(certificate: Standing['certificate']): string {
+  const { status, gapPercent } = certificate;
+  if (status !== 'BOUNDED' || gapPercent == null) return 'Searching';
+  return `Searching, ${lowerFirst(proof(certificate))}`;
+}
+
+function lowerFirst(text: string): string {
+  return text.charAt(0).toLowerCase() + text.slice(1);
 }
 
 function proof({ status, gapPercent }: Standing['certificate']): string {

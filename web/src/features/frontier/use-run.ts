@@ -1,7 +1,7 @@
 import { gql } from '@apollo/client';
 import type { TypedDocumentNode } from '@apollo/client';
 import { useApolloClient, useQuery, useSuspenseQuery } from '@apollo/client/react';
-import { useEffect, useRef } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { client } from '../../lib/apollo';
 import { RUN_FIELDS, RUN_PROGRESS_FIELDS } from './run-fields';
 import type { RunFieldsFragment } from './run-fields.generated';
@@ -13,6 +13,8 @@ import type {
   RunQueryVariables,
 } from './use-run.generated';
 
+/** Most searches end within a second or two, and that shows at once; the long ones cost the API little. */
+const YOUNG = { pollMs: 250, untilMs: 10_000 };
 const POLL_MS = 1_000;
 
 const RUN: TypedDocumentNode<RunQuery, RunQueryVariables> = gql`
@@ -42,18 +44,29 @@ export async function loadRun(id: string): Promise<void> {
   await client.query({ query: RUN, variables: { id }, fetchPolicy: 'network-only' });
 }
 
-/** The run, asked about each second until it ends. `error` tells that the last question got no answer. */
+/** The run, asked about four times a second at first, then each second, until it ends. `error` tells that the last question got no answer. */
 export function useRun(id: string): { run: Run; error: unknown } {
   const { run } = useSuspenseQuery(RUN, { variables: { id } }).data;
   const active = isActive(run.state);
   const { error } = useQuery(RUN_PROGRESS, {
     variables: { id },
-    pollInterval: POLL_MS,
+    pollInterval: useYoung(active) ? YOUNG.pollMs : POLL_MS,
     skip: !active,
     skipPollAttempt: () => document.hidden,
   });
   useWholeResultAtTheEnd(id, active);
   return { run, error: active ? error : undefined };
+}
+
+/** Whether it has only just been active: of a run opened later, the age does not matter, its news do. */
+function useYoung(active: boolean): boolean {
+  const [young, setYoung] = useState(true);
+  useEffect(() => {
+    if (!active) return;
+    const timer = setTimeout(() => setYoung(false), YOUNG.untilMs);
+    return () => clearTimeout(timer);
+  }, [active]);
+  return young;
 }
 
 /** The points that were looked at come only with the result, and are too many to ask for each second. */

@@ -1,6 +1,6 @@
 import { formatNumber, shortMoney } from '../../lib/money';
-import { boundAt } from './bound';
 import type { Front } from './front';
+import type { Portfolio } from './portfolio';
 
 /** Millions always with two decimals, so that neighbours on the chart stay apart: "2.30 M"; below that as on the rod. */
 export function shortCost(cost: number): string {
@@ -33,11 +33,20 @@ export function answerOf(front: Front, at: number): Answer {
   };
 }
 
-function certainty({ status, portfolios, bound }: Front, at: number): string {
-  const { cost, benefit } = portfolios[at]!;
-  if (status === 'COMPLETE') return 'Nothing at this cost does better.';
-  const most = boundAt(bound, cost);
-  if (most === undefined) return 'Best found so far; not yet proven complete.';
-  if (most <= benefit) return 'Nothing at this cost does better.';
-  return `At this cost, at most ${points(most - benefit)} more are possible.`;
+function certainty({ status, portfolios }: Front, at: number): string {
+  const { atMostMore } = portfolios[at]!;
+  if (status === 'COMPLETE' || atMostMore === 0) return 'Nothing at this cost does better.';
+  if (atMostMore === undefined) return 'Best found so far; not yet proven complete.';
+  return `At this cost, at most ${pointsMore(atMostMore)} more are possible.`;
+}
+
+/** What is known of better portfolios at no more than the cost of this one, as a figure. */
+export function possibleMore({ status }: Pick<Front, 'status'>, { atMostMore }: Portfolio): string {
+  if (status === 'COMPLETE' || atMostMore === 0) return 'none, proven';
+  return atMostMore === undefined ? 'not yet known' : `at most ${pointsMore(atMostMore)}`;
+}
+
+/** Rounded up to one decimal: a promise of "at most" must not shrink. */
+export function pointsMore(atMostMore: number): string {
+  return points(Math.ceil(Math.round(atMostMore * 1e4) / 1e3) / 10);
 }

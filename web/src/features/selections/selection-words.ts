@@ -17,8 +17,9 @@ export const STATE_TONES: Record<SelectionState, TagTone> = {
 
 /** How sure the search is that nothing better exists at this cost. */
 export const CERTIFICATE_WORDS: Record<CertificateStatus, string> = {
-  COMPLETE: 'The search has proven that no portfolio at this cost gains more.',
-  BOUNDED: 'The search has proven a bound on what could still be gained at this cost.',
+  COMPLETE: 'Proven complete: no better portfolio exists, at this cost or at any other.',
+  BOUNDED:
+    'The search has proven a bound on what could still be gained at this cost; part of the cost axis is still open.',
   UNPROVEN: 'It is the best found at this cost. That nothing better exists is not yet proven.',
   INFEASIBLE: 'No portfolio keeps all limits.',
 };
