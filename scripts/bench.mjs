@@ -1,6 +1,6 @@
 import { existsSync, readdirSync } from 'node:fs';
 import { basename, join } from 'node:path';
-import { checkNode, compile, installDependencies, step } from './ground.mjs';
+import { build, checkNode, compile, installDependencies, step } from './ground.mjs';
 import { runVerb } from './processes.mjs';
 import { root } from './root.mjs';
 
@@ -13,9 +13,11 @@ const [wanted, ...args] = process.argv.slice(2);
 await runVerb('bench', async (processes) => {
   checkNode();
   await installDependencies(processes);
-  await step('Build: API and kernels', () => compile(processes));
+  const chosen = benches().filter((path) => !wanted || basename(path) === `${wanted}.bench.mjs`);
+  if (chosen.some((path) => basename(path) === 'web.bench.mjs')) await build(processes);
+  else await step('Build: API and kernels', () => compile(processes));
   let failures = 0;
-  for (const bench of benches().filter((path) => !wanted || basename(path) === `${wanted}.bench.mjs`)) {
+  for (const bench of chosen) {
     console.log(`\n${bench}`);
     const { code } = await processes.run([process.execPath, bench, ...args], { cwd: root });
     if (code !== 0) failures += 1;
