@@ -13,35 +13,62 @@ export interface Losses {
   readonly loss: Float64Array;
 }
 
-/** Losses at the prices of a relaxation: benefit per unit of each row and, last, of cost. */
+/**
+ * Losses at the prices of a relaxation: benefit per unit of each row and, last, of cost. The tangent is raised by what
+ * rounding may have taken from it or put on the losses: where prices or settled costs are large, that is much more than
+ * what the benefits alone would let one expect, and a tangent too low would close a part that is not done.
+ */
 export function lossesAt(part: OpenPart, prices: Float64Array): Losses {
   const { classCount, start, row, rowMost } = part;
   const best = new Int32Array(classCount);
-  const loss = worthsAt(part, prices);
-  const priceOfCost = prices[row.length];
-  let height = part.settledBenefit - priceOfCost * part.settledCost;
-  for (let place = 0; place < row.length; place++) height += prices[place] * rowMost[place];
+  const { worth: loss, size: sizeOf } = worthsAt(part, prices);
+  let height = part.settledBenefit;
+  let size = part.settledBenefit;
+  for (let place = 0; place < row.length; place++) {
+    height += prices[place] * rowMost[place];
+    size += prices[place] * Math.abs(rowMost[place]);
+  }
   for (let k = 0; k < classCount; k++) {
     best[k] = start[k];
-    for (let option = start[k] + 1; option < start[k + 1]; option++)
+    let largest = 0;
+    for (let option = start[k]; option < start[k + 1]; option++) {
       if (loss[option] > loss[best[k]]) best[k] = option;
+      if (sizeOf[option] > largest) largest = sizeOf[option];
+    }
     const most = loss[best[k]];
     height += most;
+    size += largest;
     for (let option = start[k]; option < start[k + 1]; option++) loss[option] = most - loss[option];
   }
-  return { tangent: { height, slope: priceOfCost }, best, loss };
+  const slope = prices[row.length];
+  // the settled cost is taken off last: before, its rounding would count again with each class
+  height += ROUNDING * (size * (classCount + row.length + 8) + slope * (part.settledCost + part.to));
+  return { tangent: { height: height - slope * part.settledCost, slope }, best, loss };
 }
 
-function worthsAt(part: OpenPart, prices: Float64Array): Float64Array {
+/** What each option is worth at the prices, and the size of the figures that were added up for it. */
+function worthsAt(part: OpenPart, prices: Float64Array): { worth: Float64Array; size: Float64Array } {
   const { benefit, cost, row, termStart, termRow, termValue } = part;
   const priceOfCost = prices[row.length];
   const worth = new Float64Array(benefit.length);
+  const size = new Float64Array(benefit.length);
   for (let option = 0; option < benefit.length; option++) {
-    let sum = benefit[option] - priceOfCost * cost[option];
+    const paid = priceOfCost * cost[option];
+    let sum = benefit[option] - paid;
+    let sizes = benefit[option] + paid;
     for (let term = termStart[option]; term < termStart[option + 1]; term++) {
-      sum -= prices[termRow[term]] * termValue[term];
+      const used = prices[termRow[term]] * termValue[term];
+      sum -= used;
+      sizes += Math.abs(used);
     }
     worth[option] = sum;
+    size[option] = sizes;
   }
-  return worth;
+  return { worth, size };
 }
+
+/**
+ * A sum of n figures is off by 2⁻⁵³ × n × the sum of their sizes at most. Four times that is room for the height, for
+ * the losses, for their sum in an enumeration and for the tangent where it is read off.
+ */
+const ROUNDING = 2 ** -51;
