@@ -72,7 +72,7 @@ async function comparePhases(product, members) {
   return ratio <= MOST_RATIO;
 }
 
-/** Milliseconds of the answers to what pages ask, in turn, at a steady pace whatever they take. */
+/** Milliseconds of the answers to what pages ask, one after the other. */
 async function answerTimes({ ask, roundId }) {
   const { round } = await ask('query ($id: ID!) { round(id: $id) { runs { id state } } }', { id: roundId });
   const runId = round.runs.find(({ state }) => state === 'FINISHED').id;
@@ -90,10 +90,10 @@ async function answerTimes({ ask, roundId }) {
   const answers = [];
   const count = (1000 * PHASE_SECONDS) / ASKED_EVERY_MS;
   for (let number = 0; number < count; number += 1) {
-    answers.push(timed(() => ask(...questions[number % questions.length])));
+    answers.push(await timed(() => ask(...questions[number % questions.length])));
     await sleep(ASKED_EVERY_MS);
   }
-  return Promise.all(answers);
+  return answers;
 }
 
 async function timed(work) {
