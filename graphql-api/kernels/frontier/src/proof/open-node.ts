@@ -61,7 +61,8 @@ export class OpenNode {
   dive(goal: Goal): number {
     const { part, tangent, known } = this;
     const open = goal.gapBelow(tangent, part);
-    if (!open) return 0;
+    // where the gap is narrow there are good portfolios already
+    if (!open || open.gap * part.option.length < NARROW_GAP * sum(part.benefit)) return 0;
     const relaxation = new Relaxation(part, known);
     if (!relaxation.minimise(Math.floor((open.from + open.to) / 2))) return RELAXATION;
     const losses = lossesAt(part, relaxation.prices);
@@ -154,6 +155,10 @@ export class OpenNode {
   }
 }
 
+function sum(figures: Float64Array): number {
+  return figures.reduce((total, figure) => total + figure, 0);
+}
+
 function closed(effort: number): Outcome {
   return { children: [], effort };
 }
@@ -166,4 +171,6 @@ function everything({ option }: OpenPart): Uint8Array {
 const RELAXATION = 500;
 const MOST_BRANCHES = 2_000;
 const STRAY_SHARE = 0.25;
+/** In benefit of an average option. */
+const NARROW_GAP = 0.125;
 const SHARP_SHARE = 0.25;
