@@ -8,11 +8,19 @@ import { RunLeasesService } from './run-leases.service.js';
 import { RunSweepService } from './run-sweep.service.js';
 import { RunTasksService } from './run-tasks.service.js';
 import { SEARCH_THREADS } from './search-settings.js';
+import { SearchThreads } from './search-threads.js';
 
 /** What the worker process needs of the frontier: it searches frozen problems and builds none. */
 @Module({
   imports: [TypeOrmModule.forFeature([Run]), AuditModule],
-  providers: [FrontierJob, FrontierTaskJob, RunLeasesService, RunSweepService, RunTasksService],
+  providers: [
+    FrontierJob,
+    FrontierTaskJob,
+    RunLeasesService,
+    RunSweepService,
+    RunTasksService,
+    SearchThreads,
+  ],
 })
 export class FrontierWorkerModule {
   /** @param threads of this process that work on one run */

@@ -6,8 +6,9 @@ import { LeaseKeeper } from './lease-keeper.js';
 import { RunLeasesService, type HeldRun } from './run-leases.service.js';
 import type { RunResultRow } from './run-result.js';
 import { RunTasksService } from './run-tasks.service.js';
-import { SearchHost } from './search-host.js';
+import type { SearchHost } from './search-host.js';
 import { SEARCH_THREADS } from './search-settings.js';
+import { SearchThreads } from './search-threads.js';
 
 /**
  * Searches a run. The same run may be delivered twice, or its worker may die: the lease lets one worker at a time
@@ -24,6 +25,7 @@ export class FrontierJob implements HandlesJob<'frontier.search'>, BeforeApplica
     private readonly leases: RunLeasesService,
     private readonly tasks: RunTasksService,
     private readonly passedOver: PassedOver,
+    private readonly searchThreads: SearchThreads,
     @Inject(SEARCH_THREADS) private readonly threads: number,
   ) {}
 
@@ -41,7 +43,7 @@ export class FrontierJob implements HandlesJob<'frontier.search'>, BeforeApplica
 
   private async search(run: HeldRun) {
     const { problem, seed, evaluations, effort, seenEvaluations } = run;
-    const search = new SearchHost({
+    const search = this.searchThreads.begin({
       problem,
       seed,
       evaluations,

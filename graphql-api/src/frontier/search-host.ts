@@ -1,6 +1,6 @@
 import { AsyncResource } from 'node:async_hooks';
 import { once } from 'node:events';
-import { Worker } from 'node:worker_threads';
+import type { Worker } from 'node:worker_threads';
 import type {
   ExchangeReply,
   RunProgressRow,
@@ -19,11 +19,14 @@ export interface SearchListener {
 /** A search in a thread of its own, so that the process goes on answering its database and its signals. */
 export class SearchHost {
   private readonly stopFlag = new SharedArrayBuffer(Int32Array.BYTES_PER_ELEMENT);
-  private readonly thread: Worker;
 
-  constructor(order: Omit<SearchOrder, 'stop'>) {
-    const workerData: SearchOrder = { ...order, stop: this.stopFlag };
-    this.thread = new Worker(new URL('./search-thread.js', import.meta.url), { workerData });
+  /** @param thread one that waits for an order; it ends with this search */
+  constructor(
+    private readonly thread: Worker,
+    order: Omit<SearchOrder, 'stop'>,
+  ) {
+    const complete: SearchOrder = { ...order, stop: this.stopFlag };
+    thread.postMessage(complete);
   }
 
   /**
