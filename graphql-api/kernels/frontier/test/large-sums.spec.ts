@@ -4,15 +4,13 @@ import { pointsOf, runToEnd } from './run-search.js';
 
 describe('a front far out on the axis of cost', () => {
   it.each([1e12, 1e14])('is the same and proven where a mandatory item costs %d', (cost) => {
-    for (const seed of [1, 2]) {
-      const problem = aCeilingAlone(seed);
-      const near = runToEnd(problem, { evaluations: 1_000 });
-      const far = runToEnd(withMandatory(problem, cost), { evaluations: 1_000 });
-      expect([near.status, far.status]).toEqual(['complete', 'complete']);
-      expect(near.points.length).toBeGreaterThan(40);
-      const back = pointsOf(far).map(([dear, benefit]) => [dear - cost, benefit]);
-      expect(back).toEqual(pointsOf(near));
-    }
+    const problem = aCeilingAlone(1);
+    const near = runToEnd(problem, { evaluations: 1_000 });
+    const far = runToEnd(withMandatory(problem, cost), { evaluations: 1_000 });
+    expect([near.status, far.status]).toEqual(['complete', 'complete']);
+    expect(near.points.length).toBeGreaterThan(40);
+    const back = pointsOf(far).map(([dear, benefit]) => [dear - cost, benefit]);
+    expect(back).toEqual(pointsOf(near));
   });
 });
 
