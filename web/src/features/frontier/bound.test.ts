@@ -52,6 +52,7 @@ describe('provenText', () => {
     expect(told('BOUNDED', [[492_000, 1_270_000]], 0.6219)).toMatch(
       /^Filled rod: 62\D1.% of the axis is proven complete, from 492.k to 1\D27.M$/u,
     );
+    expect(told('BOUNDED', [[0, 504_000]], 0.1)).toMatch(/, up to 504.k$/u);
     const many: [number, number][] = [[0, 1], [2, 3], [4, 5]]; // prettier-ignore
     expect(told('BOUNDED', many, 0.99999)).toMatch(/^Filled rod: 99\D9.% of the axis is proven complete$/u);
   });

@@ -22,7 +22,7 @@ export function OtherPortfolios({ runId, front, selected }: OtherPortfoliosProps
   const id = useId();
   const { alternatives, error } = useAlternatives(runId, selected.index, open);
   return (
-    <div>
+    <Others>
       <Button
         variant="quiet"
         size="small"
@@ -41,7 +41,7 @@ export function OtherPortfolios({ runId, front, selected }: OtherPortfoliosProps
           {alternatives && <Found {...{ front, selected, alternatives }} />}
         </Answer>
       )}
-    </div>
+    </Others>
   );
 }
 
@@ -65,6 +65,13 @@ function Found({ front, selected, alternatives }: FoundProps) {
     </>
   );
 }
+
+// The words of the quiet button stand in line with the figures above.
+const Others = styled.div`
+  > button {
+    margin-left: -10px;
+  }
+`;
 
 const Answer = styled.div`
   padding: 4px 0 2px;

@@ -26,5 +26,10 @@ export function sharePercent(share: number): string {
 
 function stretches(proven: Proof['proven']): string {
   if (proven.length > MOST_NAMED) return '';
-  return `, from ${proven.map(([from, to]) => `${shortCost(from)} to ${shortCost(to)}`).join(' and ')}`;
+  return `, ${proven.map(([from, to]) => stretch(from, to)).join(' and ')}`;
+}
+
+/** A proof begins with the cheapest portfolio there is: below it, nothing can be missing. */
+function stretch(from: number, to: number): string {
+  return from <= 0 ? `up to ${shortCost(to)}` : `from ${shortCost(from)} to ${shortCost(to)}`;
 }

@@ -40,10 +40,9 @@ export function RunBar({ run, runs, mayStop, actions }: RunBarProps) {
       {run.progress && (
         <span className="muted">
           {formatNumber(run.progress.lookedAt)} looked at, {formatNumber(run.progress.kept)} kept
+          {run.certificate.status === 'BOUNDED' &&
+            `, ${sharePercent(run.certificate.provenShare)} of the axis proven`}
         </span>
-      )}
-      {run.certificate.status === 'BOUNDED' && (
-        <span className="muted">{sharePercent(run.certificate.provenShare)} of the axis proven</span>
       )}
       <Actions data-screen-only>{active ? mayStop && <Stop run={run} /> : actions}</Actions>
     </Bar>
