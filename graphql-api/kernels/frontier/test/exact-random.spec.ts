@@ -11,7 +11,7 @@ describe('problems in which any kind of limit meets any other', () => {
       for (let seed = first; seed <= last; seed++) {
         const problem = parseProblem(aTangledProblem(seed, sizeOf(seed)));
         const exact = bruteForceFront(problem);
-        const { status, ...result } = runToEnd(problem, { seed });
+        const { status, ...result } = runToEnd(problem, { seed, evaluations: FEW_EVALUATIONS });
         const front = result.points.map(({ cost, benefit }) => [cost, benefit]);
         const expected = exact.length > 0 ? 'complete' : 'infeasible';
         expect({ seed, status, front }).toEqual({ seed, status: expected, front: exact });
@@ -23,7 +23,12 @@ describe('problems in which any kind of limit meets any other', () => {
   );
 });
 
-/** Up to 16 items; one in ten problems has 13 or more, because trying every portfolio of those takes long. */
+/** So few that much of the front is left for the proof to find. */
+const FEW_EVALUATIONS = 500;
+
+/** Up to 16 items; most problems have 4 to 9, one in ten 13 or more: trying every portfolio of those takes long. */
 function sizeOf(seed: number): number {
-  return seed % 10 === 0 ? 13 + ((seed / 10) % 4) : 4 + (seed % 9);
+  if (seed % 10 === 0) return 13 + ((seed / 10) % 4);
+  if (seed % 10 === 5) return 10 + (((seed - 5) / 10) % 3);
+  return 4 + (seed % 6);
 }
