@@ -39,12 +39,7 @@ export class OpenNode {
     if (!open) return closed(0);
     const relaxation = new Relaxation(part, this.known);
     const middle = Math.floor((open.from + open.to) / 2);
-    if (!relaxation.minimise(middle)) {
-      if (middle === open.to || !relaxation.minimise(open.to)) return closed(RELAXATION);
-      const lower = { from: middle + 1, to: open.to };
-      const children = this.within(lower, everything(part), tangent, relaxation.known());
-      return { children, effort: 2 * RELAXATION };
-    }
+    if (!relaxation.minimise(middle)) return this.dearerThan(middle, open.to, relaxation);
     const losses = lossesAt(part, relaxation.prices);
     const rest = goal.gapBelow(losses.tangent, open);
     if (!rest) return closed(RELAXATION);
@@ -67,6 +62,14 @@ export class OpenNode {
     if (!relaxation.minimise(Math.floor((open.from + open.to) / 2))) return RELAXATION;
     const losses = lossesAt(part, relaxation.prices);
     return RELAXATION + dive(part, { relaxation, losses }, open, goal);
+  }
+
+  /** What is left where the relaxation has nothing that costs no more than the middle of a stretch. */
+  private dearerThan(middle: number, to: number, relaxation: Relaxation): Outcome {
+    if (middle === to || !relaxation.minimise(to)) return closed(RELAXATION);
+    const dearer = { from: middle + 1, to };
+    const children = this.within(dearer, everything(this.part), this.tangent, relaxation.known());
+    return { children, effort: 2 * RELAXATION };
   }
 
   private enumerate(
@@ -94,12 +97,7 @@ export class OpenNode {
     const known = relaxation.known();
     const branches = branchAtOption(part, shares, keep);
     if (stretch.to > stretch.from && (!branches || this.strays(tangent, stretch, relaxation))) {
-      const middle = Math.floor((stretch.from + stretch.to) / 2);
-      const halves = [
-        { from: stretch.from, to: middle },
-        { from: middle + 1, to: stretch.to },
-      ];
-      const children = halves.flatMap((half) => this.within(half, keep, tangent, known));
+      const children = halvesOf(stretch).flatMap((half) => this.within(half, keep, tangent, known));
       return { children, effort: effort + 2 * RELAXATION };
     }
     const byPieces = this.splitAtPieces(losses, stretch, shares, keep, known);
@@ -157,6 +155,14 @@ export class OpenNode {
 
 function sum(figures: Float64Array): number {
   return figures.reduce((total, figure) => total + figure, 0);
+}
+
+function halvesOf({ from, to }: Stretch): Stretch[] {
+  const middle = Math.floor((from + to) / 2);
+  return [
+    { from, to: middle },
+    { from: middle + 1, to },
+  ];
 }
 
 function closed(effort: number): Outcome {
