@@ -63,6 +63,11 @@ export class FrontierSearch {
     return this.isSearchDone && this.isProofSpent && (this.proof?.isIdle ?? true);
   }
 
+  /** Rounds of the proof that have begun. The tasks of each are longer than those of the one before. */
+  get rounds(): number {
+    return this.round;
+  }
+
   /** Whether as much has been done since the last progress as lies between two reports; the first come sooner. */
   get isReportDue(): boolean {
     const soon = Math.max(FIRST_REPORT, this.reportedAt);

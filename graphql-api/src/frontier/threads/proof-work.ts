@@ -23,15 +23,17 @@ export class ProofWork {
 
   /** Hands out what there is to do and waits until something has come of it. */
   async goOn(): Promise<void> {
+    const { rounds } = this.begun.search;
     await this.tasks.exchange(this.threads.idle > 0 || this.threads.ready === 0);
-    this.threads.start();
+    // many a search is over in the first round, before a thread could have started
+    if (rounds > ROUNDS_ALONE) this.threads.start();
     while (this.threads.idle > 0) {
       const task = this.tasks.next();
       if (task === undefined) break;
       void this.handOut(task);
     }
-    if (this.threads.ready === 0) await this.workHere();
-    else await Promise.race([this.threads.change(), sleep(LOOK_AGAIN_MS, undefined, { ref: false })]);
+    if (this.threads.ready === 0 || rounds <= ROUNDS_OF_SHORT_TASKS) await this.workHere();
+    else await this.somethingNew();
     if (this.broken) throw this.broken;
   }
 
@@ -39,12 +41,16 @@ export class ProofWork {
     return this.threads.end();
   }
 
-  /** While threads are still starting, or where there are none. */
+  /** Where there are no threads yet, and where tasks are so short that threads are not kept waiting by it. */
   private async workHere(): Promise<void> {
     const task = this.tasks.next();
-    if (task) this.tasks.accept(workTask(this.begun.model, task));
-    else await sleep(LOOK_AGAIN_MS);
+    if (!task) return this.somethingNew();
+    this.tasks.accept(workTask(this.begun.model, task));
     await setImmediate();
+  }
+
+  private async somethingNew(): Promise<void> {
+    await Promise.race([this.threads.change(), sleep(LOOK_AGAIN_MS, undefined, { ref: false })]);
   }
 
   private async handOut(task: ProofTask): Promise<void> {
@@ -58,3 +64,5 @@ export class ProofWork {
 }
 
 const LOOK_AGAIN_MS = 100;
+const ROUNDS_ALONE = 1;
+const ROUNDS_OF_SHORT_TASKS = 2;
