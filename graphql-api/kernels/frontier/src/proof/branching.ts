@@ -45,6 +45,8 @@ export function branchAtPieces(part: OpenPart, shares: Float64Array, keep: Uint8
   const fewer = Math.floor(pieces);
   if (pieces - fewer < WHOLE || pieces - fewer > 1 - WHOLE) return undefined;
   const { leastPieces, mostPieces } = part;
+  // shares of a relaxation cut short may break the part's own bounds: no branch may reach beyond them
+  if (fewer < leastPieces || fewer >= mostPieces) return undefined;
   return [
     { keep: keep.slice(), pieces: { leastPieces, mostPieces: fewer } },
     { keep: keep.slice(), pieces: { leastPieces: fewer + 1, mostPieces } },
