@@ -62,6 +62,7 @@ function search(problem: Problem, effort?: number): ThreeObjectivesResult {
 function claimOf(problem: Problem, result: ThreeObjectivesResult): ClaimedFrontier {
   const { status, bound, provenStretches, points, counts } = result;
   return {
+    format: 'metewand-frontier/1',
     fingerprint: FINGERPRINT,
     points,
     certificate: { status, bound, provenStretches, ...surfaceCertificate(problem, result) },
