@@ -21,6 +21,7 @@ function linkFor({ stage = 'SEARCH', runs = [], roles, answers = {} }: Setting) 
     Viewer: { viewer: aViewer({ roles, rounds: [round] }) },
     RoundFrontier: () => ({ round: { ...round, runs: [...runs] } }),
     Run: ({ id }) => ({ run: runs.find((run) => run.id === id) }),
+    RunNews: ({ id }) => ({ run: runs.find((run) => run.id === id) }),
     RunProgress: ({ id }) => ({ run: runs.find((run) => run.id === id) }),
     ...answers,
   });
@@ -286,7 +287,7 @@ test('shows the best found so far while searching, and the end when it comes', a
   await act(() => vi.advanceTimersByTimeAsync(1_100));
   expect(await screen.findByText('Ended, not yet proven')).toBeVisible();
   expect(screen.getByRole('heading', { level: 1 })).toHaveTextContent(/^300.k buys 60,3/u);
-  const asked = () => link.asked.filter(({ operation }) => operation === 'RunProgress').length;
+  const asked = () => link.asked.filter(({ operation }) => /^Run(News|Progress)$/u.test(operation)).length;
   const before = asked();
   await act(() => vi.advanceTimersByTimeAsync(5_000));
   expect(asked()).toBe(before);

@@ -7,14 +7,19 @@ import { RUN_FIELDS, RUN_PROGRESS_FIELDS } from './run-fields';
 import type { RunFieldsFragment } from './run-fields.generated';
 import { isActive } from './run-state';
 import type {
+  RunNewsQuery,
+  RunNewsQueryVariables,
   RunProgressQuery,
   RunProgressQueryVariables,
   RunQuery,
   RunQueryVariables,
 } from './use-run.generated';
 
-/** Most searches end within a second or two, and that shows at once; the long ones cost the API little. */
-const YOUNG = { pollMs: 250, untilMs: 10_000 };
+/**
+ * Most searches end within a second or two, and that is to show at once: so the one word whether it goes on is asked
+ * for often at first, and the many points each second.
+ */
+const YOUNG = { pollMs: 150, untilMs: 10_000 };
 const POLL_MS = 1_000;
 
 const RUN: TypedDocumentNode<RunQuery, RunQueryVariables> = gql`
@@ -24,6 +29,15 @@ const RUN: TypedDocumentNode<RunQuery, RunQueryVariables> = gql`
     }
   }
   ${RUN_FIELDS}
+`;
+
+const RUN_NEWS: TypedDocumentNode<RunNewsQuery, RunNewsQueryVariables> = gql`
+  query RunNews($id: ID!) {
+    run(id: $id) {
+      id
+      state
+    }
+  }
 `;
 
 const RUN_PROGRESS: TypedDocumentNode<RunProgressQuery, RunProgressQueryVariables> = gql`
@@ -44,18 +58,21 @@ export async function loadRun(id: string): Promise<void> {
   await client.query({ query: RUN, variables: { id }, fetchPolicy: 'network-only' });
 }
 
-/** The run, asked about four times a second at first, then each second, until it ends. `error` tells that the last question got no answer. */
+/** The run, with its news until it ends. `error` tells that the last question got no answer. */
 export function useRun(id: string): { run: Run; error: unknown } {
   const { run } = useSuspenseQuery(RUN, { variables: { id } }).data;
   const active = isActive(run.state);
-  const { error } = useQuery(RUN_PROGRESS, {
-    variables: { id },
+  const asking = { variables: { id }, skip: !active, skipPollAttempt: () => document.hidden };
+  const { error } = useQuery(RUN_PROGRESS, { ...asking, pollInterval: POLL_MS });
+  const news = useQuery(RUN_NEWS, {
+    ...asking,
     pollInterval: useYoung(active) ? YOUNG.pollMs : POLL_MS,
-    skip: !active,
-    skipPollAttempt: () => document.hidden,
+    // what it says must not stand beside the points of before
+    fetchPolicy: 'no-cache',
   });
-  useWholeResultAtTheEnd(id, active);
-  return { run, error: active ? error : undefined };
+  const hasEnded = news.data !== undefined && !isActive(news.data.run.state);
+  useWholeResultAtTheEnd(id, active && !hasEnded);
+  return { run, error: active ? (error ?? news.error) : undefined };
 }
 
 /** Whether it has only just been active: of a run opened later, the age does not matter, its news do. */
