@@ -1,4 +1,5 @@
 import { LinearSystem } from './linear-system.js';
+import type { Obstacle, Step, Stop } from './obstacle.js';
 import type { OpenPart } from './open-part.js';
 import { ScaledPart } from './scaled-part.js';
 
@@ -107,7 +108,9 @@ export class Relaxation {
       break;
     }
     for (let row = 0; row < this.prices.length; row++) {
-      this.prices[row] = this.scaled.priceOf(this.price[row], row);
+      const price = this.scaled.priceOf(this.price[row], row);
+      // any price holds, so one that got lost in rounding may as well be nought
+      this.prices[row] = Number.isFinite(price) ? price : 0;
     }
     return true;
   }
@@ -183,8 +186,8 @@ export class Relaxation {
     const entries = this.direction;
     for (const [row, tie] of ties.entries()) {
       entries.fill(0);
-      this.addEntries(entries, tie, 1);
-      this.addEntries(entries, best[classOf[tie]], -1);
+      this.scaled.addEntries(entries, tie, 1);
+      this.scaled.addEntries(entries, best[classOf[tie]], -1);
       for (const [column, figure] of free.entries()) system.set(row, column, entries[figure]);
       this.right[row] = scaled.benefit[tie] - scaled.benefit[best[classOf[tie]]];
       for (let figure = 0; figure < entries.length; figure++) {
@@ -202,15 +205,8 @@ export class Relaxation {
 
   private readWorths(): void {
     this.stepsSinceReading = 0;
-    const { worth, price, scaled } = this;
-    const { termStart, termRow, termValue } = scaled;
-    for (let option = 0; option < worth.length; option++) {
-      let sum = scaled.benefit[option];
-      for (let term = termStart[option]; term < termStart[option + 1]; term++) {
-        sum -= price[termRow[term]] * termValue[term];
-      }
-      worth[option] = sum;
-    }
+    this.worth.set(this.scaled.benefit);
+    this.scaled.takeOffEntries(this.worth, this.price);
   }
 
   /** The shares of the tied options that use up the rows with free prices, and what is left of each row. */
@@ -220,7 +216,7 @@ export class Relaxation {
     shares.fill(0);
     for (let k = 0; k < part.classCount; k++) {
       shares[best[k]] = 1;
-      this.addEntries(left, best[k], -1);
+      this.scaled.addEntries(left, best[k], -1);
     }
     if (ties.length === 0) return;
     for (const [column, figure] of free.entries()) right[column] = left[figure];
@@ -230,8 +226,8 @@ export class Relaxation {
       const rival = best[classOf[tie]];
       shares[tie] = share;
       shares[rival] -= share;
-      this.addEntries(left, tie, -share);
-      this.addEntries(left, rival, share);
+      this.scaled.addEntries(left, tie, -share);
+      this.scaled.addEntries(left, rival, share);
     }
   }
 
@@ -328,7 +324,7 @@ export class Relaxation {
         obstacle.kind === 'tie'
           ? Number(tie === obstacle.tie)
           : obstacle.sign *
-            (this.entryOf(best[classOf[tie]], obstacle.row) - this.entryOf(tie, obstacle.row));
+            (this.scaled.entryOf(best[classOf[tie]], obstacle.row) - this.scaled.entryOf(tie, obstacle.row));
     }
     direction.fill(0);
     if (ties.length > 0) {
@@ -336,14 +332,8 @@ export class Relaxation {
       for (const [column, figure] of free.entries()) direction[figure] = solution[column];
     }
     if (obstacle.kind === 'row') direction[obstacle.row] = obstacle.sign;
-    const { termStart, termRow, termValue } = scaled;
-    for (let option = 0; option < this.slope.length; option++) {
-      let sum = 0;
-      for (let term = termStart[option]; term < termStart[option + 1]; term++) {
-        sum -= direction[termRow[term]] * termValue[term];
-      }
-      this.slope[option] = sum;
-    }
+    this.slope.fill(0);
+    scaled.takeOffEntries(this.slope, direction);
   }
 
   private leastPoint(rate: number): Stop | undefined {
@@ -397,21 +387,6 @@ export class Relaxation {
     }
   }
 
-  private addEntries(sums: Float64Array, option: number, times: number): void {
-    const { termStart, termRow, termValue } = this.scaled;
-    for (let term = termStart[option]; term < termStart[option + 1]; term++) {
-      sums[termRow[term]] += times * termValue[term];
-    }
-  }
-
-  private entryOf(option: number, row: number): number {
-    const { termStart, termRow, termValue } = this.scaled;
-    for (let term = termStart[option]; term < termStart[option + 1]; term++) {
-      if (termRow[term] === row) return termValue[term];
-    }
-    return 0;
-  }
-
   private addTie(option: number): void {
     this.ties.push(option);
     this.isTie[option] = 1;
@@ -438,19 +413,6 @@ export class Relaxation {
 function larger(one: number, other: number): number {
   return Math.max(one, other);
 }
-
-/** What can be moved: a tie loosened, or the price of a row changed. `rate`: how the sum changes at first. */
-type Step =
-  | { readonly kind: 'tie'; readonly tie: number; readonly rate: number }
-  | { readonly kind: 'row'; readonly row: number; readonly sign: 1 | -1; readonly rate: number };
-
-/** Or: the best option of a class has a share below nought, and first has to change places with this tie. */
-type Obstacle = Step | { readonly kind: 'best'; readonly tie: number };
-
-/** Where a walk ends: an option comes to tie with the best of its class, or a price falls to zero. */
-type Stop =
-  | { readonly kind: 'tie'; readonly option: number; readonly distance: number }
-  | { readonly kind: 'zero'; readonly row: number; readonly distance: number };
 
 /** All figures are near one: these tell a difference from rounding. */
 const SMALLEST_PIVOT = 1e-9;

@@ -8,9 +8,9 @@ import type { OpenPart } from './open-part.js';
 export class ScaledPart {
   readonly benefit: Float64Array;
   readonly bound: Float64Array;
-  readonly termStart: Int32Array;
-  readonly termRow: Int32Array;
-  readonly termValue: Float64Array;
+  private readonly termStart: Int32Array;
+  private readonly termRow: Int32Array;
+  private readonly termValue: Float64Array;
   private readonly benefitScale: number;
   private readonly rowScale: Float64Array;
 
@@ -46,6 +46,34 @@ export class ScaledPart {
 
   scaledPriceOf(price: number, row: number): number {
     return (price * this.benefitScale) / this.rowScale[row];
+  }
+
+  /** Adds the entries of an option, so many times, to sums by row. */
+  addEntries(sums: Float64Array, option: number, times: number): void {
+    const { termStart, termRow, termValue } = this;
+    for (let term = termStart[option]; term < termStart[option + 1]; term++) {
+      sums[termRow[term]] += times * termValue[term];
+    }
+  }
+
+  entryOf(option: number, row: number): number {
+    const { termStart, termRow, termValue } = this;
+    for (let term = termStart[option]; term < termStart[option + 1]; term++) {
+      if (termRow[term] === row) return termValue[term];
+    }
+    return 0;
+  }
+
+  /** Takes off a figure of each option what its entries come to at some prices. */
+  takeOffEntries(figures: Float64Array, prices: Float64Array): void {
+    const { termStart, termRow, termValue } = this;
+    for (let option = 0; option < figures.length; option++) {
+      let figure = figures[option];
+      for (let term = termStart[option]; term < termStart[option + 1]; term++) {
+        figure -= prices[termRow[term]] * termValue[term];
+      }
+      figures[option] = figure;
+    }
   }
 
   private layTerms(largest: Float64Array): void {
