@@ -47,7 +47,7 @@ describe('a local search', () => {
       search.offerStart(everyLast, steps % 2 === 0 ? 0 : 0.02);
       expect(search.archive.evaluations).toBeGreaterThan(before);
     }
-    expect(search.archive.evaluations).toBeGreaterThan(200_000);
+    expect(search.archive.evaluations).toBeGreaterThan(100_000);
     expectTrueMembers(search);
   });
 });
