@@ -25,7 +25,7 @@ describe('problems drawn at random, every kind of limit and link at once', () =>
     let points = 0;
     for (const seed of seeds(15)) {
       const problem = parseProblem(aRandomProblem(seed, 40));
-      const result = runToEnd(problem, { seed, evaluations: 100_000 });
+      const result = runToEnd(problem, { seed, evaluations: 100_000, effort: 100_000 });
       for (const [place, { picks, benefit, cost }] of result.points.entries()) {
         expect(violationsOf(problem, picks)).toEqual([]);
         expect(totalsOf(problem, picks)).toMatchObject({ benefit, cost });
