@@ -2,6 +2,7 @@ import type { ChildProcess } from 'node:child_process';
 import { setTimeout as sleep } from 'node:timers/promises';
 import { TestApp, type Member } from './app.js';
 import { aDemoOrganisation, asOwner, inOrganisation, type DemoOrganisation } from './demo-organisation.js';
+import { knottyProblem } from './knotty-problem.js';
 import { ENDED, readRun, runOnce, startSearch, underWay, type RunView } from './runs.js';
 import { startWorker, stopWorker } from './worker-process.js';
 
@@ -227,20 +228,6 @@ async function aRun(): Promise<string> {
     await client.query('commit');
   });
   return id as string;
-}
-
-/** Benefit and cost go together, so that bounds decide little: some four seconds of one core. */
-function knottyProblem() {
-  let state = 3;
-  const random = () => (state = (state * 48_271) % 2_147_483_647) / 2_147_483_647;
-  const items = Array.from({ length: 44 }, (_, index) => {
-    const cost = 10 + Math.floor(random() * 90);
-    const uses = [1 + Math.floor(random() * 9), 1 + Math.floor(random() * 9)];
-    return { id: `I${index}`, cost, benefit: cost + 20, uses };
-  });
-  const limits = ['days', 'power'].map((name) => ({ name, most: 88 }));
-  const ceiling = Math.floor(items.reduce((sum, { cost }) => sum + cost, 0) / 2);
-  return { format: 'metewand-problem/1', items, limits, ceiling };
 }
 
 function change(sql: string, parameters: unknown[] = []) {
