@@ -2,6 +2,7 @@ import { narrow } from '../relaxation/narrow-part.js';
 import type { OpenPart } from '../relaxation/open-part.js';
 import { Relaxation } from '../relaxation/relaxation.js';
 import { Deviations } from './deviations.js';
+import { RELAXATION } from './effort.js';
 import { Enumeration } from './enumeration.js';
 import type { Goal } from './goal.js';
 import { lossesAt, type Losses } from './losses.js';
@@ -80,5 +81,4 @@ function settleHalf(part: OpenPart, shares: Float64Array): Uint8Array | undefine
 const CORE = 100;
 const MOST_DEPTH = 40;
 const BRANCHES = 2_000;
-const RELAXATION = 500;
 const WHOLE = 1e-6;

@@ -4,6 +4,7 @@ import { Relaxation, type KnownPrices } from '../relaxation/relaxation.js';
 import { branchAtFirst, branchAtOption, branchAtPieces } from './branching.js';
 import { Deviations } from './deviations.js';
 import { dive } from './dive.js';
+import { RELAXATION } from './effort.js';
 import { Enumeration } from './enumeration.js';
 import type { Goal } from './goal.js';
 import { lossesAt, type Losses } from './losses.js';
@@ -173,8 +174,6 @@ function everything({ option }: OpenPart): Uint8Array {
   return new Uint8Array(option.length).fill(1);
 }
 
-/** What solving a relaxation counts for, in branches of an enumeration. */
-const RELAXATION = 500;
 const MOST_BRANCHES = 2_000;
 const STRAY_SHARE = 0.25;
 /** In benefit of an average option. */
