@@ -1,3 +1,4 @@
+import { Edge } from './edge.js';
 import { LinearSystem } from './linear-system.js';
 import type { Obstacle, Step, Stop } from './obstacle.js';
 import type { OpenPart } from './open-part.js';
@@ -49,10 +50,9 @@ export class Relaxation {
   private readonly worth: Float64Array;
   private stepsSinceReading = 0;
   private readonly slope: Float64Array;
+  private readonly edge: Edge;
   private readonly direction: Float64Array;
   private readonly left: Float64Array;
-  private readonly nextBreak: Float64Array;
-  private readonly nextOption: Int32Array;
   private readonly system = new LinearSystem();
   private readonly right: Float64Array;
   private readonly solution: Float64Array;
@@ -78,10 +78,10 @@ export class Relaxation {
     this.slope = new Float64Array(options);
     this.direction = new Float64Array(figures);
     this.left = new Float64Array(figures);
-    this.nextBreak = new Float64Array(classCount);
-    this.nextOption = new Int32Array(classCount);
     this.right = new Float64Array(figures);
     this.solution = new Float64Array(figures);
+    const { price, direction, worth, slope, best, isTie, tiesInClass } = this;
+    this.edge = new Edge(part, { price, direction, worth, slope, best, isTie, tiesInClass });
     this.startAt(known);
   }
 
@@ -102,7 +102,7 @@ export class Relaxation {
         continue;
       }
       if (this.walk(obstacle)) continue;
-      const isImpossible = this.fallsForEver();
+      const isImpossible = this.edge.fallsForEver(this.scaled.bound);
       this.takeBackBest();
       if (isImpossible) return false;
       break;
@@ -270,7 +270,7 @@ export class Relaxation {
   private walk(obstacle: Step): boolean {
     this.point(obstacle);
     if (obstacle.kind === 'tie') this.dropTie(obstacle.tie);
-    const stop = this.leastPoint(obstacle.rate);
+    const stop = this.edge.leastPoint(obstacle.rate);
     if (stop === undefined) return false;
     const { price, direction } = this;
     for (let row = 0; row < price.length; row++) {
@@ -282,25 +282,6 @@ export class Relaxation {
     this.stepsSinceReading++;
     this.exchange(obstacle, stop);
     return true;
-  }
-
-  /**
-   * Whether along the direction the sum falls without end, which no portfolio in shares could follow. Only a fall well
-   * beyond rounding counts: where the bounds can just be met, the sum is level in truth.
-   */
-  private fallsForEver(): boolean {
-    const { part, scaled, direction, slope } = this;
-    let fall = 0;
-    let size = 0;
-    const add = (term: number): void => {
-      fall += term;
-      size += Math.abs(term);
-    };
-    for (let row = 0; row < direction.length; row++) add(scaled.bound[row] * direction[row]);
-    for (let k = 0; k < part.classCount; k++) {
-      add(slope.subarray(part.start[k], part.start[k + 1]).reduce(larger, -Infinity));
-    }
-    return fall < -SURELY * size;
   }
 
   private exchange(obstacle: Step, stop: Stop): void {
@@ -336,57 +317,6 @@ export class Relaxation {
     scaled.takeOffEntries(this.slope, direction);
   }
 
-  private leastPoint(rate: number): Stop | undefined {
-    const { part, best, slope, nextBreak, nextOption, tiesInClass } = this;
-    const zero = this.firstZero();
-    for (let k = 0; k < part.classCount; k++) this.findBreak(k);
-    let slopeNow = rate;
-    for (;;) {
-      let k = -1;
-      let distance = zero?.distance ?? Infinity;
-      for (let other = 0; other < nextBreak.length; other++) {
-        if (nextBreak[other] >= distance) continue;
-        distance = nextBreak[other];
-        k = other;
-      }
-      if (k < 0) return zero;
-      const option = nextOption[k];
-      slopeNow += slope[option] - slope[best[k]];
-      // a class with ties cannot change its best option: the ties would be lost with it
-      if (slopeNow >= 0 || tiesInClass[k] > 0) return { kind: 'tie', option, distance };
-      best[k] = option;
-      this.findBreak(k);
-    }
-  }
-
-  /** Where the first price falls to zero. */
-  private firstZero(): Stop | undefined {
-    const { price, direction } = this;
-    let first: Stop | undefined;
-    for (let row = 0; row < price.length; row++) {
-      if (direction[row] >= -STILL) continue;
-      const distance = price[row] / -direction[row];
-      if (!first || distance < first.distance) first = { kind: 'zero', row, distance };
-    }
-    return first;
-  }
-
-  /** Where another option of a class overtakes the one that is best so far. */
-  private findBreak(k: number): void {
-    const { part, worth, slope, nextBreak, nextOption } = this;
-    const best = this.best[k];
-    nextBreak[k] = Infinity;
-    for (let option = part.start[k]; option < part.start[k + 1]; option++) {
-      const gain = slope[option] - slope[best];
-      // ties move along with the best: what tells them apart is rounding
-      if (gain <= STILL || this.isTie[option] === 1) continue;
-      const distance = Math.max(0, (worth[best] - worth[option]) / gain);
-      if (distance >= nextBreak[k]) continue;
-      nextBreak[k] = distance;
-      nextOption[k] = option;
-    }
-  }
-
   private addTie(option: number): void {
     this.ties.push(option);
     this.isTie[option] = 1;
@@ -410,14 +340,8 @@ export class Relaxation {
   }
 }
 
-function larger(one: number, other: number): number {
-  return Math.max(one, other);
-}
-
 /** All figures are near one: these tell a difference from rounding. */
 const SMALLEST_PIVOT = 1e-9;
 const ALLOWED = 1e-9;
-const STILL = 1e-12;
 const TIE = 1e-9;
 const STEPS_BETWEEN_READINGS = 16;
-const SURELY = 1e-7;
