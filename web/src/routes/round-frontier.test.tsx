@@ -116,6 +116,7 @@ test('says how many points could still be missed, and when none could', async ()
   expect(await screen.findByText('Proven complete')).toBeVisible();
   expect(screen.getByRole('heading', { level: 1 })).toHaveTextContent('Nothing at this cost does better.');
   expect(screen.getByText(/no better portfolio exists at any cost$/u)).toBeVisible();
+  expect(screen.getByText('Nothing beats these')).toBeVisible();
 });
 
 test('tells when asked what else there is at the cost of A', async () => {

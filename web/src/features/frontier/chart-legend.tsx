@@ -11,7 +11,7 @@ import type { Run } from './use-run';
 
 interface ChartLegendProps {
   front: Front;
-  run: Pick<Run, 'lookedAt' | 'onceKept'>;
+  run: Pick<Run, 'certificate' | 'lookedAt' | 'onceKept'>;
   geometry: Geometry;
   chosen: Chosen;
 }
@@ -25,7 +25,7 @@ export function ChartLegend({ front, run, geometry, chosen }: ChartLegendProps) 
   return (
     <Signs style={{ paddingLeft: geometry.plot.x }}>
       <Sign drawing={BEST}>
-        Best found so far
+        {run.certificate.status === 'COMPLETE' ? 'Nothing beats these' : 'Best found so far'}
         {thinned && `, ${formatNumber(pegs)} of ${formatNumber(portfolios.length)} shown`}
       </Sign>
       {portfolios.some(({ aboveCeiling }) => aboveCeiling) && <Sign drawing={ABOVE}>Above the ceiling</Sign>}

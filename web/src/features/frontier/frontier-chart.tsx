@@ -18,7 +18,7 @@ const ChartPoints = lazy(() => import('./chart-points'));
 
 interface FrontierChartProps {
   front: Front;
-  run: Pick<Run, 'lookedAt' | 'onceKept'>;
+  run: Pick<Run, 'certificate' | 'lookedAt' | 'onceKept'>;
   chosen: Chosen;
   /** The answer sentence, as the chart's description. */
   answer: string;
