@@ -1,4 +1,5 @@
 import type { ProofNode, ProofTask, ProofTaskResult } from './proof-task.js';
+import { StepLine } from './step-line.js';
 
 type Point = readonly [cost: number, benefit: number];
 
@@ -43,6 +44,7 @@ export class FrontierProof {
   /** Begins a round with what is known by now: points in order of cost. Only when the one before is over. */
   startRound(points: readonly Point[]): void {
     this.collectWhatIsLeft();
+    const line = new StepLine(points);
     const effort = Math.min(MOST_EFFORT, FIRST_EFFORT * EFFORT_GROWTH ** this.round);
     for (const window of farApartFirst(this.windows.length)) {
       const nodes = this.windows[window];
@@ -52,7 +54,7 @@ export class FrontierProof {
         this.waiting.push({
           id,
           nodes: piece,
-          known: knownFor(piece, points),
+          known: knownFor(piece, line),
           dives: this.round < DIVING_ROUNDS,
           effort,
         });
@@ -122,23 +124,10 @@ function piecesOf(nodes: readonly ProofNode[]): ProofNode[][] {
 }
 
 /** The points in the stretches of some nodes, and the last one before. */
-function knownFor(nodes: readonly ProofNode[], points: readonly Point[]): Point[] {
+function knownFor(nodes: readonly ProofNode[], line: StepLine): Point[] {
   const from = nodes.reduce((least, node) => Math.min(least, node.from), Infinity);
   const to = nodes.reduce((most, node) => Math.max(most, node.to), -Infinity);
-  const firstInside = placeAfter(points, from);
-  return points.slice(Math.max(0, firstInside - 1), placeAfter(points, to));
-}
-
-/** Place of the first point that costs more. */
-function placeAfter(points: readonly Point[], cost: number): number {
-  let low = 0;
-  let high = points.length;
-  while (low < high) {
-    const middle = (low + high) >> 1;
-    if (points[middle][0] <= cost) low = middle + 1;
-    else high = middle;
-  }
-  return low;
+  return line.pointsFor({ from, to });
 }
 
 /** Efforts in branches of an enumeration: at first some milliseconds a window, later about a second a task. */

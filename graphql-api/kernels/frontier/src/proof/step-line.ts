@@ -39,8 +39,13 @@ export class StepLine {
     return true;
   }
 
-  points(): [cost: number, benefit: number][] {
-    return Array.from({ length: this.count }, (_, place) => [this.costs[place], this.benefits[place]]);
+  points(): Point[] {
+    return this.pointsBetween(0, this.count);
+  }
+
+  /** What makes up the line over a stretch: its points there, and the last one before. */
+  pointsFor({ from, to }: Stretch): Point[] {
+    return this.pointsBetween(Math.max(0, this.placeAfter(from) - 1), this.placeAfter(to));
   }
 
   /**
@@ -67,6 +72,13 @@ export class StepLine {
     return first > last ? undefined : { gap: gap + slack, from: first, to: last };
   }
 
+  private pointsBetween(first: number, end: number): Point[] {
+    return Array.from({ length: end - first }, (_, place) => [
+      this.costs[first + place],
+      this.benefits[first + place],
+    ]);
+  }
+
   /** Place of the first point that costs more. */
   private placeAfter(cost: number): number {
     let low = 0;
@@ -88,6 +100,8 @@ export class StepLine {
     this.benefits = benefits;
   }
 }
+
+type Point = [cost: number, benefit: number];
 
 /** A straight line above every portfolio of some part: its benefit is at most height + slope × its cost. */
 export interface Tangent {
